@@ -19,7 +19,7 @@ import java.util.StringJoiner;
 /** Checks and conversions of a method's inputs. */
 final class Inputs {
 
-  /** Caution: an input is outside the published range. */
+  /** Caution: an input is outside the method's range. */
   static final String OUTSIDE = "M01";
 
   /** Caution: rows of a column are impossible and were set missing. */
@@ -85,7 +85,7 @@ final class Inputs {
     }
   }
 
-  /** Sets impossible rows missing and tells of them and of rows outside the published range. */
+  /** Sets impossible rows missing and tells of them and of rows outside the method's range. */
   static void sift(
       MethodCard card, List<MethodInput> inputs, double[][] columns, boolean[] same, Series like) {
     for (int i = 0; i < columns.length; i++) {
@@ -129,7 +129,7 @@ final class Inputs {
           Caution.of(
               OUTSIDE,
               card.id() + "/" + input.name(),
-              String.format(Locale.ROOT, "%s: %d of %d rows have a %s outside the published range %s%s",
+              String.format(Locale.ROOT, "%s: %d of %d rows have a %s outside the method's range %s%s",
                   card.title(), flagged, kept, input.name(), valid, input.unit().suffix())));
     }
   }
@@ -170,7 +170,7 @@ final class Inputs {
   }
 
   private static String outside(MethodCard card, MethodInput input, double value) {
-    return String.format(Locale.ROOT, "%s: %s %s is outside the published range %s%s",
+    return String.format(Locale.ROOT, "%s: %s %s is outside the method's range %s%s",
         card.title(),
         input.name(),
         Numbers.text(value) + input.unit().suffix(),

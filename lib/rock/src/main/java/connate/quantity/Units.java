@@ -325,6 +325,10 @@ public final class Units {
   public static final Unit<Ratio> number =
       Ratio.DIMENSION.unit("1", 1, 0, "number", "unitless", "dimensionless");
 
+  /** The unit decades of Ratio. */
+  public static final Unit<Ratio> decades =
+      Ratio.DIMENSION.unit("decades", 1, 0, "decade");
+
   /** The unit s/m of Slowness. */
   public static final Unit<Slowness> sPerM =
       Slowness.DIMENSION.unit("s/m", 1, 0);
@@ -778,6 +782,11 @@ public final class Units {
   /** Returns so many 1. */
   public static Ratio number(double value) {
     return Ratio.of(value, number);
+  }
+
+  /** Returns so many decades. */
+  public static Ratio decades(double value) {
+    return Ratio.of(value, decades);
   }
 
   /** Returns so many s/m. */

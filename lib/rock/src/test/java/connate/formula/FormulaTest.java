@@ -66,7 +66,7 @@ class FormulaTest {
   /** By hand: 0.2 × 10² = 20. */
   @Test
   void valueConvertsUnits() {
-    assertEquals(mD(20), formula.value(percent(20), Units.mm(0.01)));
+    assertEquals(20, formula.value(percent(20), Units.mm(0.01)).in(Units.mD), 1e-12);
     assertEquals(List.of("toy"), used);
     formula.value(percent(20), um(10));
     assertEquals(1, used.size(), "a card is noted once");
