@@ -28,8 +28,9 @@ public sealed interface Event {
    * @param code a short stable code
    * @param about what it concerns: a method, a file, a column
    * @param text the caution in one or two sentences
+   * @param count how many times the command raised it
    */
-  record Cautioned(String code, String about, String text) implements Event {}
+  record Cautioned(String code, String about, String text, int count) implements Event {}
 
   /**
    * A published method was used.
@@ -75,11 +76,12 @@ public sealed interface Event {
   record Returned(String variable, String type, Item item) implements Event {}
 
   /**
-   * The command threw, or died with its engine.
+   * The command did not compile, was refused, threw, or died with its engine.
    *
-   * @param kind {@code exception}, {@code stopped}, {@code exit}, {@code memory} or {@code died}
+   * @param kind {@code compile}, {@code refused}, {@code exception}, {@code stopped}, {@code exit},
+   *     {@code memory} or {@code died}
    * @param type the exception's class name, empty where none
-   * @param message the message in plain words, with the way out where there is one
+   * @param message the message in plain words, with place and way out where there is one
    * @param frames the stack as far as it concerns the reader, innermost first
    * @param badInput whether the input data are at fault, which makes the exit status 3
    */
