@@ -21,12 +21,12 @@ public final class Replay {
   }
 
   /** Runs a workbook to its end. */
-  public static Outcome run(Workbook workbook, ReplaySettings settings, ReplayWatcher watcher) {
+  public static ReplayOutcome run(Workbook workbook, ReplaySettings settings, ReplayWatcher watcher) {
     return of(workbook, settings, watcher).run();
   }
 
   /** Runs the commands and returns when the last has ended, one failed, or {@link #stop} came. */
-  public Outcome run() {
+  public ReplayOutcome run() {
     throw new UnsupportedOperationException(workbook + " " + settings + " " + watcher);
   }
 

@@ -14,7 +14,7 @@ import java.util.Set;
  * @param why why it was compiled command by command, empty where it was not or was told to
  * @param unused the names of assumptions that were to take another value and that no command stated
  */
-public record Outcome(
+public record ReplayOutcome(
     Kind kind,
     Command command,
     Event.Failed failure,
