@@ -142,7 +142,8 @@ final class IndexChecks {
       widest = Math.max(widest, Math.abs(step));
     }
     tellOrder(repeated, turned);
-    tellStep(uneven, sign * Math.abs(uneven < 0 ? common : at(1) - at(0)), widest);
+    double first = at(1) - at(0);
+    tellStep(uneven, first == 0 ? common : first, widest);
     if (sign < 0) {
       quirks.note("L80", 0, "the index decreases: logged upwards");
     }

@@ -1,5 +1,6 @@
 package connate.las;
 
+import connate.quantity.Numbers;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
@@ -190,10 +191,8 @@ final class IndexFinder {
     return Math.abs(a - b) <= Math.max(1e-6 * Math.abs(b), 0.01 * step);
   }
 
-  /** Writes a number without a needless decimal. */
+  /** Writes a number at ten digits, so that last bits do not show. */
   static String plain(double value) {
-    return value == Math.rint(value) && Math.abs(value) < 1e15
-        ? Long.toString((long) value)
-        : Double.toString(value);
+    return Double.isFinite(value) ? Numbers.record(value) : "missing";
   }
 }

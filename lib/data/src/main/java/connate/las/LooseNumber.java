@@ -37,6 +37,8 @@ record LooseNumber(Kind kind, double value) {
           "1.#ind", "-1.#ind", "1.#qnan", "-1.#qnan", "#num!", "#div/0!");
   private static final Pattern FORTRAN =
       Pattern.compile("([+-]?(?:\\d+\\.?\\d*|\\.\\d+))(?:[dD]([+-]?\\d{1,3})|([+-]\\d{2,3}))");
+  private static final Pattern EXPONENT =
+      Pattern.compile("[+-]?(?:\\d+\\.?\\d*|\\.\\d+)[eE][+-]?\\d+");
   private static final Pattern COMMA = Pattern.compile("[+-]?\\d*(?:,\\d+)+(?:\\.\\d*)?");
 
   /** Takes an item without the blanks around it. */
@@ -59,6 +61,9 @@ record LooseNumber(Kind kind, double value) {
     if (fortran.matches()) {
       String power = fortran.group(2) == null ? fortran.group(3) : fortran.group(2);
       return new LooseNumber(Kind.FORTRAN, Double.parseDouble(fortran.group(1) + "e" + power));
+    }
+    if (EXPONENT.matcher(item).matches()) {
+      return new LooseNumber(Kind.OVERFLOW, Double.NaN);
     }
     Kind kind = COMMA.matcher(item).matches() ? Kind.COMMA : Kind.TEXT;
     return new LooseNumber(kind, Double.NaN);

@@ -13,9 +13,10 @@ final class OddLines {
    *
    * @param from the offset of its start
    * @param items the number of items it holds
+   * @param isRow true where it has the right number of items and starts with a number
    * @param fault what is wrong with it, with its place
    */
-  private record Misfit(int from, int items, Fault fault) {}
+  private record Misfit(int from, int items, boolean isRow, Fault fault) {}
 
   private static final int KEPT = 200;
   private static final int MOST_STRAY = 3;
@@ -124,7 +125,7 @@ final class OddLines {
             ? "write a point before the decimals and nothing between thousands"
             : "correct the value, or set such rows aside with LasOptions.STRICT.settingRowsAside()";
     int at = text.offset(from, line, place[0]);
-    add(new Misfit(from, items,
+    add(new Misfit(from, items, column > 0,
         text.fault(at, text.offset(from, line, place[1]), isComma ? "L14" : "L08",
             message.formatted(item, column + 1), help)));
   }
@@ -132,7 +133,7 @@ final class OddLines {
   private void misfit(int from, String line, List<int[]> places, int columns) {
     int[] place = places.get(places.size() - 1);
     int at = text.offset(from, line, place[0]);
-    add(new Misfit(from, places.size(),
+    add(new Misfit(from, places.size(), false,
         text.fault(at, text.offset(from, line, place[1]), "L07",
             "row of %d values, where ~C lists %d curves".formatted(places.size(), columns),
             "correct the row, or set such rows aside with LasOptions.STRICT.settingRowsAside()")));
@@ -178,7 +179,7 @@ final class OddLines {
   void settle(Columns columns) {
     tally.tell();
     takeStrayLines(columns);
-    takeFragment(columns.count());
+    takeFragment(columns);
     if (misfitCount == 0) {
       return;
     }
@@ -198,7 +199,9 @@ final class OddLines {
       return;
     }
     int stray = 0;
-    while (stray < misfits.size() && misfits.get(stray).from < columns.offset(0)) {
+    while (stray < misfits.size()
+        && misfits.get(stray).from < columns.offset(0)
+        && !misfits.get(stray).isRow) {
       stray++;
     }
     if (stray > MOST_STRAY) {
@@ -211,16 +214,19 @@ final class OddLines {
     misfitCount -= stray;
   }
 
-  private void takeFragment(int columns) {
+  private void takeFragment(Columns columns) {
     boolean isFragment =
-        misfitCount > 0 && last.from == lastContent && last.items < columns
-            && "L07".equals(last.fault.code());
+        misfitCount > 0
+            && columns.rows() > 0
+            && last.from == lastContent
+            && last.from > columns.offset(columns.rows() - 1)
+            && last.items < columns.count();
     if (!isFragment) {
       return;
     }
     quirks.caution("L43", last.fault.line(),
         "the data end in a fragment of %d values, where %d were expected: left out"
-            .formatted(last.items, columns));
+            .formatted(last.items, columns.count()));
     misfits.remove(last);
     misfitCount--;
   }
