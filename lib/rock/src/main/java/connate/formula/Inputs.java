@@ -92,12 +92,12 @@ final class Inputs {
       if (same[i]) {
         check(card, inputs.get(i), columns[i][0]);
       } else {
-        sift(card, inputs.get(i), columns[i], like);
+        sift(card, inputs.get(i), columns[i]);
       }
     }
   }
 
-  private static void sift(MethodCard card, MethodInput input, double[] column, Series like) {
+  private static void sift(MethodCard card, MethodInput input, double[] column) {
     Range possible = input.possible();
     Range valid = input.valid();
     int refused = 0;
@@ -107,7 +107,7 @@ final class Inputs {
     int kept = 0;
     for (int row = 0; row < column.length; row++) {
       double value = column[row];
-      if (value != value) {
+      if (Double.isNaN(value)) {
         continue;
       }
       if (!possible.contains(value)) {
