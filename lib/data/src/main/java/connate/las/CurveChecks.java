@@ -13,8 +13,8 @@ final class CurveChecks {
 
   /** Values that programs write for "no value" or for "above the scale", beside the null. */
   private static final double[] SENTINELS = {
-    -999.25, -999, -9999, -9999.25, -99999, -999.999, -999.9, 999.25, 9999, 9999.25, 99999,
-    999999, 100000, 1000000, 1e30, -1e30
+    -999.25, -999, -9999, -9999.25, -99999, -999.999, -999.9, 999.25, 9999, 9999.25, 99999, 999999,
+    100000, 1000000, 1e30, -1e30
   };
 
   private static final int SHOWN = 6;
@@ -58,10 +58,12 @@ final class CurveChecks {
     for (LasCurve curve : curves) {
       LasCurve other = first.putIfAbsent(HeaderReader.key(curve.mnemonic()), curve);
       if (other != null) {
-        quirks.caution("L36", curve.header().line(),
+        quirks.caution(
+            "L36",
+            curve.header().line(),
             "%s is listed again (first on line %d): named %s; %s"
-                .formatted(curve.mnemonic(), other.header().line(), curve.name(),
-                    compared(other, curve)));
+                .formatted(
+                    curve.mnemonic(), other.header().line(), curve.name(), compared(other, curve)));
       }
     }
   }
@@ -122,7 +124,8 @@ final class CurveChecks {
       }
     }
     firstMark = marks.isEmpty() ? curve.header().line() : firstMark;
-    marks.computeIfAbsent(sentinel, s -> new ArrayList<>())
+    marks
+        .computeIfAbsent(sentinel, s -> new ArrayList<>())
         .add(curve.name() + " (" + count + " times)");
   }
 
@@ -130,11 +133,16 @@ final class CurveChecks {
   void summarise() {
     marks.forEach(
         (mark, names) ->
-            quirks.caution("L39", firstMark,
+            quirks.caution(
+                "L39",
+                firstMark,
                 "%s stands at the end of the values of %s: a mark for no value or out of scale? "
-                    .formatted(plain(mark), some(names)) + "kept as values"));
+                        .formatted(plain(mark), some(names))
+                    + "kept as values"));
     if (!spanning.isEmpty()) {
-      quirks.caution("L40", firstSpanning,
+      quirks.caution(
+          "L40",
+          firstSpanning,
           "the null value %s lies among the values of %s: read as missing all the same"
               .formatted(plain(nullValue), some(spanning)));
     }

@@ -55,13 +55,17 @@ final class HeadChecks {
       } else if (Double.isNaN(HeaderNumber.of(item))) {
         boolean isClear = LooseNumber.of(item.value()).isClear();
         if (!isClear && !settingAside) {
-          throw text.refusal(item, "L15",
+          throw text.refusal(
+              item,
+              "L15",
               "%s is '%s', where a number was expected".formatted(mnemonic, item.value()),
               "correct the line, or leave the value blank");
         }
         quirks.caution("L51", item.line(), mnemonic + " has no value");
       } else if (item.value().isEmpty()) {
-        quirks.caution("L51", item.line(),
+        quirks.caution(
+            "L51",
+            item.line(),
             mnemonic + " touches the dot, where the unit belongs: read as its value");
       }
     }
@@ -74,10 +78,14 @@ final class HeadChecks {
   private void nulls() {
     HeaderLine item = wellItem("NULL");
     if (item == null || Double.isNaN(HeaderNumber.of(item))) {
-      quirks.caution("L41", item == null ? 0 : item.line(),
+      quirks.caution(
+          "L41",
+          item == null ? 0 : item.line(),
           "no null value is declared: every number is taken as a value");
     } else if (Math.abs(HeaderNumber.of(item)) < 100) {
-      quirks.caution("L40", item.line(),
+      quirks.caution(
+          "L40",
+          item.line(),
           "the null value %s is a value that a log can have"
               .formatted(IndexFinder.plain(HeaderNumber.of(item))));
     }
@@ -88,21 +96,31 @@ final class HeadChecks {
     if (!kinds.contains(Kind.PARAMETER)) {
       quirks.note("L76", 0, "no parameter section");
     } else if (kinds.indexOf(Kind.PARAMETER) < kinds.indexOf(Kind.CURVE)) {
-      quirks.note("L76", head.sections().get(kinds.indexOf(Kind.PARAMETER)).line(),
+      quirks.note(
+          "L76",
+          head.sections().get(kinds.indexOf(Kind.PARAMETER)).line(),
           "the parameters stand before the curves");
     }
     if (kinds.indexOf(Kind.DATA) < kinds.size() - 1) {
-      quirks.note("L55", head.sections().get(kinds.indexOf(Kind.DATA)).line(),
+      quirks.note(
+          "L55",
+          head.sections().get(kinds.indexOf(Kind.DATA)).line(),
           "the log data are not the last section");
     }
     for (LasSection section : head.sections()) {
       switch (section.kind()) {
-        case UNKNOWN -> quirks.note("L55", section.line(),
-            "%s is a section that the standard does not know: kept as text"
-                .formatted(section.title().strip()));
-        case SET_DATA -> quirks.note("L55", section.line(),
-            "%s is a data set beside the log".formatted(section.title().strip()));
-        default -> { }
+        case UNKNOWN ->
+            quirks.note(
+                "L55",
+                section.line(),
+                "%s is a section that the standard does not know: kept as text"
+                    .formatted(section.title().strip()));
+        case SET_DATA ->
+            quirks.note(
+                "L55",
+                section.line(),
+                "%s is a data set beside the log".formatted(section.title().strip()));
+        default -> {}
       }
     }
   }
@@ -117,9 +135,15 @@ final class HeadChecks {
         HeaderLine other = first.putIfAbsent(HeaderReader.key(item.mnemonic()), item);
         if (other != null && !isZone(item)) {
           boolean isSame = other.value().equals(item.value());
-          quirks.caution("L37", item.line(), "%s stands twice, first on line %d, with %s: the "
-              .formatted(item.mnemonic(), other.line(), isSame ? "the same value" : "another value")
-              + "first is taken");
+          quirks.caution(
+              "L37",
+              item.line(),
+              "%s stands twice, first on line %d, with %s: the "
+                      .formatted(
+                          item.mnemonic(),
+                          other.line(),
+                          isSame ? "the same value" : "another value")
+                  + "first is taken");
         }
       }
     }
@@ -183,7 +207,9 @@ final class HeadChecks {
       }
     }
     if (most > LONG_LINE - 2) {
-      quirks.note("L72", text.lineOf(at),
+      quirks.note(
+          "L72",
+          text.lineOf(at),
           "lines of up to " + most + " characters, where version 2.0 of 1992 allows 256");
     }
   }

@@ -3,7 +3,7 @@ package connate.las;
 import java.util.Objects;
 
 /**
- * One line of a header section: {@code MNEM.UNIT  VALUE : DESCRIPTION {FORMAT} | ASSOCIATION}.
+ * One line of a header section: {@code MNEM.UNIT VALUE : DESCRIPTION {FORMAT} | ASSOCIATION}.
  *
  * @param line the line in the file, counted from 1
  * @param text the line as it stands

@@ -8,8 +8,8 @@ final class HeaderNumber {
   private HeaderNumber() {}
 
   /**
-   * Returns the number that a line holds, NaN where it holds none. Words behind the number are
-   * left out; a number that touches the dot, where the unit should stand, is taken too.
+   * Returns the number that a line holds, NaN where it holds none. Words behind the number are left
+   * out; a number that touches the dot, where the unit should stand, is taken too.
    */
   static double of(HeaderLine item) {
     String words = item.value().isEmpty() ? item.unit() : item.value();

@@ -20,7 +20,9 @@ final class HeaderParse {
     return split(line, text, text.length(), "", "");
   }
 
-  /** Returns a curve's line with a unit such as {@code 1000 lbf}, which holds a blank, put right. */
+  /**
+   * Returns a curve's line with a unit such as {@code 1000 lbf}, which holds a blank, put right.
+   */
   static HeaderLine withBlankUnit(HeaderLine curve) {
     String both = curve.unit() + " " + curve.value();
     if (!BLANK_UNIT.matcher(both).matches()) {

@@ -10,7 +10,12 @@ import java.util.Set;
 final class HeaderReader {
 
   private static final Set<Kind> WITH_ITEMS =
-      Set.of(Kind.VERSION, Kind.WELL, Kind.CURVE, Kind.PARAMETER, Kind.SET_PARAMETER,
+      Set.of(
+          Kind.VERSION,
+          Kind.WELL,
+          Kind.CURVE,
+          Kind.PARAMETER,
+          Kind.SET_PARAMETER,
           Kind.SET_DEFINITION);
 
   private final LasText text;
@@ -37,14 +42,19 @@ final class HeaderReader {
       if (line.startsWith("#")) {
         comments++;
       } else if (line.codePoints().noneMatch(Character::isLetter)) {
-        throw text.refusal(at, end, "L03", "data stand before the first section",
+        throw text.refusal(
+            at,
+            end,
+            "L03",
+            "data stand before the first section",
             "a LAS file starts with ~V; put the header above the numbers");
       } else {
         quirks.caution("L52", text.lineOf(at), "text above the first section: left out");
       }
     }
     if (comments > 0) {
-      quirks.note("L75", text.lineOf(text.from), comments + " comment lines above the first section");
+      quirks.note(
+          "L75", text.lineOf(text.from), comments + " comment lines above the first section");
     }
   }
 
@@ -87,8 +97,7 @@ final class HeaderReader {
     }
   }
 
-  private void item(
-      int line, String words, Kind kind, LasVersion version, List<HeaderLine> items) {
+  private void item(int line, String words, Kind kind, LasVersion version, List<HeaderLine> items) {
     HeaderLine item =
         version == LasVersion.V3_0
             ? HeaderParse.version3(line, words)
@@ -118,7 +127,9 @@ final class HeaderReader {
   /** Tells of blank lines and foreign characters, once for the file. */
   void summarise() {
     if (foreign > 0) {
-      quirks.note("L71", firstForeign,
+      quirks.note(
+          "L71",
+          firstForeign,
           foreign + " header lines hold characters outside ASCII: read as UTF-8 or Windows-1252");
     }
     if (blanks > 0) {
@@ -155,7 +166,9 @@ final class HeaderReader {
       return LasVersion.V3_0;
     }
     String stated = item.value().isEmpty() ? item.unit() : item.value();
-    throw text.refusal(item, "L06",
+    throw text.refusal(
+        item,
+        "L06",
         "VERS is '%s', where 1.2, 2.0 or 3.0 was expected".formatted(stated),
         "correct the VERS line");
   }

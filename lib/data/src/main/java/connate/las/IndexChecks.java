@@ -51,10 +51,14 @@ final class IndexChecks {
       }
       if (fits(row)) {
         index[row] = well.nullValue();
-        quirks.caution("L40", text.lineOf(columns.offset(row)),
+        quirks.caution(
+            "L40",
+            text.lineOf(columns.offset(row)),
             "the index equals the null value here, and fits between its neighbours: kept");
       } else {
-        quirks.caution("L40", text.lineOf(columns.offset(row)),
+        quirks.caution(
+            "L40",
+            text.lineOf(columns.offset(row)),
             "row without an index: left out, since it has no place");
         columns.remove(row);
       }
@@ -76,7 +80,9 @@ final class IndexChecks {
     double used = DepthUnit.metres(header.unit());
     boolean differ = stated != used && !Double.isNaN(stated) && !Double.isNaN(used);
     if (differ) {
-      quirks.caution("L49", header.line(),
+      quirks.caution(
+          "L49",
+          header.line(),
           "STRT is in %s, the curve %s in %s: the curve's unit is taken"
               .formatted(well.startUnit(), header.mnemonic(), header.unit()));
     }
@@ -90,7 +96,9 @@ final class IndexChecks {
     double stop = well.stop() * scale;
     boolean isReversed = !near(first, start) && near(last, start);
     if (isReversed) {
-      quirks.caution("L31", well.line(0),
+      quirks.caution(
+          "L31",
+          well.line(0),
           "STRT is %s, but the data run the other way, from %s to %s: kept as they stand"
               .formatted(plain(well.start()), plain(first), plain(last)));
     }
@@ -136,7 +144,9 @@ final class IndexChecks {
       } else if (step * sign < 0 && turned < 0) {
         turned = i;
       }
-      if (uneven < 0 && step != 0 && Math.abs(step - at(1) + at(0)) > 0.05 * Math.abs(at(1) - at(0))) {
+      if (uneven < 0
+          && step != 0
+          && Math.abs(step - at(1) + at(0)) > 0.05 * Math.abs(at(1) - at(0))) {
         uneven = i;
       }
       widest = Math.max(widest, Math.abs(step));
@@ -151,11 +161,15 @@ final class IndexChecks {
 
   private void tellOrder(int repeated, int turned) {
     if (repeated > 0) {
-      quirks.caution("L34", text.lineOf(columns.offset(repeated)),
+      quirks.caution(
+          "L34",
+          text.lineOf(columns.offset(repeated)),
           "the index %s comes twice".formatted(plain(at(repeated))));
     }
     if (turned > 0) {
-      quirks.caution("L35", text.lineOf(columns.offset(turned)),
+      quirks.caution(
+          "L35",
+          text.lineOf(columns.offset(turned)),
           "the index turns back, from %s to %s"
               .formatted(plain(at(turned - 1)), plain(at(turned))));
     }
@@ -165,26 +179,34 @@ final class IndexChecks {
     double stated = well.step() * scale();
     boolean isStatedIrregular = stated == 0 || Double.isNaN(stated);
     if (isStatedIrregular && uneven > 0) {
-      quirks.note("L32", text.lineOf(columns.offset(uneven)),
+      quirks.note(
+          "L32",
+          text.lineOf(columns.offset(uneven)),
           "STEP is 0: the index is irregular, widest step " + plain(widest));
       return;
     }
     if (uneven > 0) {
-      quirks.caution("L32", text.lineOf(columns.offset(uneven)),
+      quirks.caution(
+          "L32",
+          text.lineOf(columns.offset(uneven)),
           "the step is uneven here: from %s to %s, where STEP is %s; widest step %s"
-              .formatted(plain(at(uneven - 1)), plain(at(uneven)), plain(well.step()),
-                  plain(widest)));
+              .formatted(
+                  plain(at(uneven - 1)), plain(at(uneven)), plain(well.step()), plain(widest)));
     }
     if (isStatedIrregular) {
       return;
     }
     if (stated * step < 0) {
-      quirks.caution("L31", well.line(2),
-          "STEP is %s, but the index runs the other way: by %s".formatted(plain(well.step()),
-              plain(step)));
+      quirks.caution(
+          "L31",
+          well.line(2),
+          "STEP is %s, but the index runs the other way: by %s"
+              .formatted(plain(well.step()), plain(step)));
     }
     if (Math.abs(Math.abs(stated) - Math.abs(step)) > 0.01 * Math.abs(stated)) {
-      quirks.caution("L32", well.line(2),
+      quirks.caution(
+          "L32",
+          well.line(2),
           "STEP is %s, but the data step by %s".formatted(plain(well.step()), plain(step)));
     }
   }

@@ -92,10 +92,12 @@ final class IndexFinder {
   private Found byLabels() {
     int curve = named();
     if (Double.isNaN(well.start()) || !matches(labelled[curve], curve)) {
-      throw contradiction(curve, "the labels of the data section name column "
-          + (labelled[curve] + 1));
+      throw contradiction(
+          curve, "the labels of the data section name column " + (labelled[curve] + 1));
     }
-    quirks.caution("L30", curves.get(curve).line(),
+    quirks.caution(
+        "L30",
+        curves.get(curve).line(),
         "the curve section lists the columns in another order than the labels of the data: "
             + "ordered by the labels, where %s is column %d and starts at STRT"
                 .formatted(curves.get(curve).mnemonic(), labelled[curve] + 1));
@@ -105,7 +107,9 @@ final class IndexFinder {
   private Found withoutStart(int named, int[] order) {
     boolean isNamed = NAMES.contains(HeaderReader.key(curves.get(0).mnemonic()));
     if (named != 0 || !isNamed || columns.isText(0)) {
-      throw text.refusal("L09", "no STRT, and the first curve is no " + "depth or time by its name",
+      throw text.refusal(
+          "L09",
+          "no STRT, and the first curve is no " + "depth or time by its name",
           "name the index: LasOptions.STRICT.withIndex(\"" + curves.get(named).mnemonic() + "\")");
     }
     return new Found(0, order);
@@ -115,7 +119,9 @@ final class IndexFinder {
     boolean first = matches(0, 0);
     boolean other = matches(named, named);
     if (other && !first) {
-      quirks.caution("L30", curves.get(named).line(),
+      quirks.caution(
+          "L30",
+          curves.get(named).line(),
           "the index %s is not the first curve: found in column %d, which starts at STRT"
               .formatted(curves.get(named).mnemonic(), named + 1));
       return new Found(named, order);
@@ -131,12 +137,20 @@ final class IndexFinder {
 
   private RuntimeException contradiction(int curve, String other) {
     HeaderLine line = curves.get(curve);
-    return text.refusal(line, "L10",
+    return text.refusal(
+        line,
+        "L10",
         "%s is listed as curve %d, but %s: STRT is %s, and that column starts at %s"
-            .formatted(line.mnemonic(), curve + 1, other, plain(well.start()),
+            .formatted(
+                line.mnemonic(),
+                curve + 1,
+                other,
+                plain(well.start()),
                 plain(first(other.startsWith("column 1,") ? 0 : labelled[curve]))),
         "put the curve lines into the order of the columns, or name the index: "
-            + "LasOptions.STRICT.withIndex(\"" + line.mnemonic() + "\")");
+            + "LasOptions.STRICT.withIndex(\""
+            + line.mnemonic()
+            + "\")");
   }
 
   private RuntimeException noStart(int curve) {
@@ -151,8 +165,7 @@ final class IndexFinder {
     String message =
         "STRT is %s, but %s starts at %s; %s"
             .formatted(plain(well.start()), name, plain(first(curve)), where);
-    String help =
-        "correct STRT, or name the index: LasOptions.STRICT.withIndex(\"" + name + "\")";
+    String help = "correct STRT, or name the index: LasOptions.STRICT.withIndex(\"" + name + "\")";
     int at = text.from;
     while (text.lineOf(at) < well.line(0) && at < text.to) {
       at = text.afterLine(text.lineEnd(at));

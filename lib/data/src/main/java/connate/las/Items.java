@@ -69,7 +69,9 @@ final class Items {
   /** Returns the end of an item; a quote opens only at its start and closes only at its end. */
   private static int itemEnd(String line, int from, char delimiter) {
     int first = from;
-    while (first < line.length() && isBlank(line.charAt(first)) && line.charAt(first) != delimiter) {
+    while (first < line.length()
+        && isBlank(line.charAt(first))
+        && line.charAt(first) != delimiter) {
       first++;
     }
     if (first < line.length() && line.charAt(first) == '"') {

@@ -57,11 +57,16 @@ public final class LasCurve {
     return header;
   }
 
-  /** Returns the unit as written; empty where there is none, also where the file says so in words. */
+  /**
+   * Returns the unit as written; empty where there is none, also where the file says so in words.
+   */
   public String unit() {
     String unit = header.unit();
-    boolean isNone = unit.equals("_") || unit.equals("-") || unit.equalsIgnoreCase("NONE")
-        || unit.equalsIgnoreCase("UNITLESS");
+    boolean isNone =
+        unit.equals("_")
+            || unit.equals("-")
+            || unit.equalsIgnoreCase("NONE")
+            || unit.equalsIgnoreCase("UNITLESS");
     return isNone ? "" : unit;
   }
 

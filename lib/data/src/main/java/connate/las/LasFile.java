@@ -132,7 +132,9 @@ public final class LasFile {
     return head.sections();
   }
 
-  /** Returns the header lines of the first section of a kind, none where there is no such section. */
+  /**
+   * Returns the header lines of the first section of a kind, none where there is no such section.
+   */
   public List<HeaderLine> items(LasSection.Kind kind) {
     return head.items(kind);
   }
@@ -155,7 +157,9 @@ public final class LasFile {
   /** Returns a curve by its name or mnemonic, in capitals or not. */
   public Optional<LasCurve> curve(String named) {
     String wanted = named.toUpperCase(Locale.ROOT);
-    return curves.stream().filter(c -> c.name().toUpperCase(Locale.ROOT).equals(wanted)).findFirst();
+    return curves.stream()
+        .filter(c -> c.name().toUpperCase(Locale.ROOT).equals(wanted))
+        .findFirst();
   }
 
   /** Returns the index curve. */

@@ -42,7 +42,9 @@ final class LasReader {
         new IndexFinder(text, well, lines, columns, labels, quirks).find(options.index());
     int column = found.order()[found.curve()];
     if (columns.isText(column)) {
-      throw text.refusal(lines.get(found.curve()), "L17",
+      throw text.refusal(
+          lines.get(found.curve()),
+          "L17",
           "the index %s holds text".formatted(lines.get(found.curve()).mnemonic()),
           "give the index as a number: depth, or seconds from a start");
     }
@@ -51,8 +53,7 @@ final class LasReader {
     List<LasSet> sets =
         new SetReader(text, quirks, stated(head).delimiter(), head.nullValue())
             .read(head.sections());
-    return new LasFile(
-        text.file, bytes, head, curves, found.curve(), sets, quirks.sorted());
+    return new LasFile(text.file, bytes, head, curves, found.curve(), sets, quirks.sorted());
   }
 
   private LasHead head(List<Sections.Raw> raw) {
@@ -72,7 +73,11 @@ final class LasReader {
     }
     reader.summarise();
     if (data == null) {
-      throw text.refusal(text.to, text.to, "L04", "no data: no section ~A",
+      throw text.refusal(
+          text.to,
+          text.to,
+          "L04",
+          "no data: no section ~A",
           version == LasVersion.V3_0 ? "add ~Log_Data" : "add ~A above the numbers");
     }
     LasHead head = new LasHead(version, sections, Double.NaN);
@@ -83,7 +88,10 @@ final class LasReader {
 
   private void takeData(Sections.Raw section) {
     if (data != null) {
-      throw text.refusal(section.titleFrom(), text.lineEnd(section.titleFrom()), "L11",
+      throw text.refusal(
+          section.titleFrom(),
+          text.lineEnd(section.titleFrom()),
+          "L11",
           "a second data section; the first is on line " + text.lineOf(data.titleFrom()),
           "split the file in two");
     }
@@ -92,12 +100,14 @@ final class LasReader {
 
   private void checkCurves(List<HeaderLine> lines) {
     if (lines.isEmpty()) {
-      throw text.refusal("L05", "no curves: the section ~C is missing or empty",
+      throw text.refusal(
+          "L05",
+          "no curves: the section ~C is missing or empty",
           "add ~C with one line per column of the data");
     }
     if (lines.size() > MOST_COLUMNS) {
-      throw text.refusal("L16", lines.size() + " curves, where at most 10000 are read",
-          "split the file");
+      throw text.refusal(
+          "L16", lines.size() + " curves, where at most 10000 are read", "split the file");
     }
   }
 

@@ -36,7 +36,10 @@ public record LasSet(
       }
     }
     throw new IllegalArgumentException(
-        name + " has no column " + mnemonic + "; it has "
+        name
+            + " has no column "
+            + mnemonic
+            + "; it has "
             + String.join(", ", columns.stream().map(HeaderLine::mnemonic).toList()));
   }
 }

@@ -149,8 +149,7 @@ final class LasText {
   int offset(int lineFrom, String line, int character) {
     boolean isOneToOne = lineEnd(lineFrom) - lineFrom == line.length();
     String before = line.substring(0, character);
-    return lineFrom
-        + (isOneToOne ? character : before.getBytes(StandardCharsets.UTF_8).length);
+    return lineFrom + (isOneToOne ? character : before.getBytes(StandardCharsets.UTF_8).length);
   }
 
   /** Returns a fault at a place, with the line's text. */

@@ -5,8 +5,8 @@ import java.util.List;
 
 /**
  * How the values of the data stand: one row a line or wrapped, split by blanks, commas or tabs,
- * with a point or a comma for decimals. Header and data often disagree; the data win where they
- * are clear, with a caution.
+ * with a point or a comma for decimals. Header and data often disagree; the data win where they are
+ * clear, with a caution.
  *
  * @param delimiter the byte between values, 0 for a run of blanks
  * @param point the byte before the decimals
@@ -38,12 +38,24 @@ record Layout(byte delimiter, byte point, boolean wrapped) {
   private static Layout settled(Layout stated, Layout found, int line, int columns, Quirks quirks) {
     boolean wrapped = columns == 1 ? stated.wrapped : found.wrapped;
     if (wrapped != stated.wrapped) {
-      quirks.caution("L48", line, "WRAP says " + (stated.wrapped ? "YES" : "NO")
-          + ", but a row stands on " + (found.wrapped ? "several lines" : "one line") + ": read so");
+      quirks.caution(
+          "L48",
+          line,
+          "WRAP says "
+              + (stated.wrapped ? "YES" : "NO")
+              + ", but a row stands on "
+              + (found.wrapped ? "several lines" : "one line")
+              + ": read so");
     }
     if (found.delimiter != stated.delimiter) {
-      quirks.caution("L48", line, "values are split by " + named(found.delimiter)
-          + " where the header says " + named(stated.delimiter) + ": read so");
+      quirks.caution(
+          "L48",
+          line,
+          "values are split by "
+              + named(found.delimiter)
+              + " where the header says "
+              + named(stated.delimiter)
+              + ": read so");
     }
     if (found.point == ',') {
       quirks.caution("L47", line, "decimals stand behind a comma: read as decimal numbers");

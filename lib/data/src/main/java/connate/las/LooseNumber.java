@@ -31,10 +31,24 @@ record LooseNumber(Kind kind, double value) {
   }
 
   private static final Set<String> NULL_WORDS =
-      Set.of("null", "(null)", "nan", "+nan", "-nan", "-", "--", "na", "n/a", "none", "#n/a", "nil");
+      Set.of(
+          "null", "(null)", "nan", "+nan", "-nan", "-", "--", "na", "n/a", "none", "#n/a", "nil");
   private static final Set<String> OVERFLOWS =
-      Set.of("inf", "+inf", "-inf", "infinity", "+infinity", "-infinity", "1.#inf", "-1.#inf",
-          "1.#ind", "-1.#ind", "1.#qnan", "-1.#qnan", "#num!", "#div/0!");
+      Set.of(
+          "inf",
+          "+inf",
+          "-inf",
+          "infinity",
+          "+infinity",
+          "-infinity",
+          "1.#inf",
+          "-1.#inf",
+          "1.#ind",
+          "-1.#ind",
+          "1.#qnan",
+          "-1.#qnan",
+          "#num!",
+          "#div/0!");
   private static final Pattern FORTRAN =
       Pattern.compile("([+-]?(?:\\d+\\.?\\d*|\\.\\d+))(?:[dD]([+-]?\\d{1,3})|([+-]\\d{2,3}))");
   private static final Pattern EXPONENT =

@@ -86,8 +86,10 @@ final class OddLines {
         continue;
       }
       LooseNumber number = LooseNumber.of(decimalPoint(Items.bare(item)));
-      if (!number.isClear() || c == 0 && number.kind() != LooseNumber.Kind.PLAIN
-          && number.kind() != LooseNumber.Kind.FORTRAN) {
+      if (!number.isClear()
+          || c == 0
+              && number.kind() != LooseNumber.Kind.PLAIN
+              && number.kind() != LooseNumber.Kind.FORTRAN) {
         countText(line, places);
         notANumber(from, line, place, number, c, places.size());
         return;
@@ -125,18 +127,33 @@ final class OddLines {
             ? "write a point before the decimals and nothing between thousands"
             : "correct the value, or set such rows aside with LasOptions.STRICT.settingRowsAside()";
     int at = text.offset(from, line, place[0]);
-    add(new Misfit(from, items, column > 0,
-        text.fault(at, text.offset(from, line, place[1]), isComma ? "L14" : "L08",
-            message.formatted(item, column + 1), help)));
+    add(
+        new Misfit(
+            from,
+            items,
+            column > 0,
+            text.fault(
+                at,
+                text.offset(from, line, place[1]),
+                isComma ? "L14" : "L08",
+                message.formatted(item, column + 1),
+                help)));
   }
 
   private void misfit(int from, String line, List<int[]> places, int columns) {
     int[] place = places.get(places.size() - 1);
     int at = text.offset(from, line, place[0]);
-    add(new Misfit(from, places.size(), false,
-        text.fault(at, text.offset(from, line, place[1]), "L07",
-            "row of %d values, where ~C lists %d curves".formatted(places.size(), columns),
-            "correct the row, or set such rows aside with LasOptions.STRICT.settingRowsAside()")));
+    add(
+        new Misfit(
+            from,
+            places.size(),
+            false,
+            text.fault(
+                at,
+                text.offset(from, line, place[1]),
+                "L07",
+                "row of %d values, where ~C lists %d curves".formatted(places.size(), columns),
+                "correct the row, or set such rows aside with LasOptions.STRICT.settingRowsAside()")));
   }
 
   private void add(Misfit misfit) {
@@ -224,7 +241,9 @@ final class OddLines {
     if (!isFragment) {
       return;
     }
-    quirks.caution("L43", last.fault.line(),
+    quirks.caution(
+        "L43",
+        last.fault.line(),
         "the data end in a fragment of %d values, where %d were expected: left out"
             .formatted(last.items, columns.count()));
     misfits.remove(last);

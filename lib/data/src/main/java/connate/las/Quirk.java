@@ -3,7 +3,8 @@ package connate.las;
 import java.util.Objects;
 
 /**
- * Something in a file that the standard does not foresee, or that a reader of the numbers must know.
+ * Something in a file that the standard does not foresee, or that a reader of the numbers must
+ * know.
  *
  * @param code a short stable code such as {@code L36}, explained by {@code help("L36")}
  * @param weight whether it can touch what the numbers mean

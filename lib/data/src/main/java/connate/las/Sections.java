@@ -31,9 +31,25 @@ final class Sections {
   }
 
   private static final Set<String> FULL_NAMES =
-      Set.of("VERSION", "WELL", "CURVE", "CURVES", "PARAMETER", "PARAMETERS", "OTHER", "ASCII",
-          "VERSION_INFORMATION", "WELL_INFORMATION", "CURVE_INFORMATION", "PARAMS", "A", "C", "P",
-          "W", "V", "O");
+      Set.of(
+          "VERSION",
+          "WELL",
+          "CURVE",
+          "CURVES",
+          "PARAMETER",
+          "PARAMETERS",
+          "OTHER",
+          "ASCII",
+          "VERSION_INFORMATION",
+          "WELL_INFORMATION",
+          "CURVE_INFORMATION",
+          "PARAMS",
+          "A",
+          "C",
+          "P",
+          "W",
+          "V",
+          "O");
 
   private final LasText text;
   private final List<Raw> found = new ArrayList<>();

@@ -39,7 +39,9 @@ final class SetReader {
       columns = named(sections, SectionKinds.bare(definition));
     }
     if (columns == null) {
-      quirks.caution("L55", data.line(),
+      quirks.caution(
+          "L55",
+          data.line(),
           "%s has no definition %s: left out".formatted(data.title().strip(), definition));
       return;
     }
@@ -82,8 +84,10 @@ final class SetReader {
         items.remove(columns);
       }
       if (items.size() != columns) {
-        quirks.caution("L55", line, "row of %d items, where %d are defined: left out"
-            .formatted(items.size(), columns));
+        quirks.caution(
+            "L55",
+            line,
+            "row of %d items, where %d are defined: left out".formatted(items.size(), columns));
         continue;
       }
       items.replaceAll(i -> NumberScan.plain(i) == nullValue ? "" : i.strip());

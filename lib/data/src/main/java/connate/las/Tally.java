@@ -59,7 +59,7 @@ final class Tally {
       case OVERFLOW -> count(Kind.OVERFLOW, offset);
       case EMPTY -> count(Kind.EMPTY, offset);
       case FORTRAN -> count(Kind.FORTRAN, offset);
-      default -> { }
+      default -> {}
     }
   }
 
@@ -70,8 +70,7 @@ final class Tally {
   }
 
   /** Returns the places without an empty one that a delimiter at the line's end leaves. */
-  List<int[]> withoutTrailingDelimiter(
-      List<int[]> places, int columns, Layout layout, int offset) {
+  List<int[]> withoutTrailingDelimiter(List<int[]> places, int columns, Layout layout, int offset) {
     if (layout.delimiter() == 0 || places.size() != columns + 1) {
       return places;
     }

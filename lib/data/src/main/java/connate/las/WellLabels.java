@@ -44,8 +44,13 @@ final class WellLabels {
     boolean isOld = version == LasVersion.V1_2;
     if (labelBefore && !labelBehind) {
       if (!isOld) {
-        quirks.caution("L50", item.line(), "%s has its value after the colon, as in version 1.2: "
-            .formatted(item.mnemonic()) + "read '" + behind + "'");
+        quirks.caution(
+            "L50",
+            item.line(),
+            "%s has its value after the colon, as in version 1.2: ".formatted(item.mnemonic())
+                + "read '"
+                + behind
+                + "'");
       }
       return item.withValue(behind, before);
     }
@@ -54,8 +59,13 @@ final class WellLabels {
     }
     if (labelBehind) {
       if (!before.isEmpty()) {
-        quirks.caution("L50", item.line(), "%s has its value before the colon, as in version 2.0: "
-            .formatted(item.mnemonic()) + "read '" + before + "'");
+        quirks.caution(
+            "L50",
+            item.line(),
+            "%s has its value before the colon, as in version 2.0: ".formatted(item.mnemonic())
+                + "read '"
+                + before
+                + "'");
       }
       return item.withValue(before, behind);
     }

@@ -31,7 +31,8 @@ final class WrappedScan {
     this.settingAside = settingAside;
     this.numbers = new NumberScan(text.bytes, (byte) '.');
     this.tally = new Tally(text, quirks);
-    this.columns = new Columns(block.columns(), (block.to() - block.from()) / (8 * block.columns()));
+    this.columns =
+        new Columns(block.columns(), (block.to() - block.from()) / (8 * block.columns()));
   }
 
   /** Returns the numbers of the block. */
@@ -62,8 +63,12 @@ final class WrappedScan {
     byte b = text.bytes[at];
     while (b != '\n' && b != '\r') {
       if (filled == columns.count()) {
-        misfit(lineFrom, at, "L12", "the row that starts at line %d runs over: more than %d values"
-            .formatted(text.lineOf(rowFrom), columns.count()));
+        misfit(
+            lineFrom,
+            at,
+            "L12",
+            "the row that starts at line %d runs over: more than %d values"
+                .formatted(text.lineOf(rowFrom), columns.count()));
         return;
       }
       int end = item(at);
@@ -84,9 +89,13 @@ final class WrappedScan {
     }
     boolean isIndexLine = filled == items;
     if (!isFirstRow && isIndexLine && items != firstShape.get(0)) {
-      misfit(lineFrom, lineFrom, "L12",
+      misfit(
+          lineFrom,
+          lineFrom,
+          "L12",
           "a row starts with %d values on its first line, where the first row starts with %d: "
-              .formatted(items, firstShape.get(0)) + "a value of the row above is missing");
+                  .formatted(items, firstShape.get(0))
+              + "a value of the row above is missing");
       return;
     }
     if (filled == columns.count()) {
@@ -105,7 +114,10 @@ final class WrappedScan {
       }
       LooseNumber loose = LooseNumber.of(text.text(at, end));
       if (!loose.isClear()) {
-        misfit(rowFrom, at, "L08",
+        misfit(
+            rowFrom,
+            at,
+            "L08",
             "'%s' in curve %d is not a number".formatted(text.text(at, end), filled + 1));
         return -1;
       }
@@ -121,19 +133,26 @@ final class WrappedScan {
     filled = 0;
     int end = text.lineEnd(at);
     if (faults.size() < DataException.SHOWN) {
-      faults.add(text.fault(at, end, code, message,
-          "correct the rows, or set them aside with LasOptions.STRICT.settingRowsAside()"));
+      faults.add(
+          text.fault(
+              at,
+              end,
+              code,
+              message,
+              "correct the rows, or set them aside with LasOptions.STRICT.settingRowsAside()"));
     }
     if (!settingAside) {
       throw new DataException(faults, faultCount);
     }
-    quirks.caution(code.equals("L08") ? "L45" : code, text.lineOf(lineFrom),
-        "row set aside: " + message);
+    quirks.caution(
+        code.equals("L08") ? "L45" : code, text.lineOf(lineFrom), "row set aside: " + message);
   }
 
   private void finish() {
     if (filled > 0) {
-      quirks.caution("L43", text.lineOf(rowFrom),
+      quirks.caution(
+          "L43",
+          text.lineOf(rowFrom),
           "the data end in a fragment of %d values, where %d were expected: left out"
               .formatted(filled, columns.count()));
     }

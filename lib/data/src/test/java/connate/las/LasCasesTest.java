@@ -109,21 +109,23 @@ class LasCasesTest {
   // 3 and 4: colons and dots
 
   @ParameterizedTest
-  @CsvSource(delimiter = ';', value = {
-    "TIME. 12:31:05 : time logged; TIME; ''; 12:31:05; time logged",
-    "PATH. C:\\logs\\a.las : source file; PATH; ''; C:\\logs\\a.las; source file",
-    "PATH. C:\\logs\\a.las; PATH; ''; C:\\logs\\a.las; ''",
-    "TIME. 12:31:05; TIME; ''; 12:31:05; ''",
-    "NOTE. a : b : c; NOTE; ''; a : b; c",
-    "DATE. 2013/12/13 08:50 :created {YYYY/MM/DD hh:mm}; DATE; ''; 2013/12/13 08:50; "
-        + "created {YYYY/MM/DD hh:mm}",
-    "RT.ohm.m 3.5 : res; RT; ohm.m; 3.5; res",
-    "TDEP..1IN 7 : depth; TDEP; .1IN; 7; depth",
-    "EKB .M  12.5 : kelly; EKB; M; 12.5; kelly",
-    "A B.C\t1 2\t: tabs; A B; C; 1 2; tabs",
-    "RM.OHMM_DEGF 1.30 @ 72F: mud; RM; OHMM_DEGF; 1.30 @ 72F; mud",
-    "EMPTY. :; EMPTY; ''; ''; ''"
-  })
+  @CsvSource(
+      delimiter = ';',
+      value = {
+        "TIME. 12:31:05 : time logged; TIME; ''; 12:31:05; time logged",
+        "PATH. C:\\logs\\a.las : source file; PATH; ''; C:\\logs\\a.las; source file",
+        "PATH. C:\\logs\\a.las; PATH; ''; C:\\logs\\a.las; ''",
+        "TIME. 12:31:05; TIME; ''; 12:31:05; ''",
+        "NOTE. a : b : c; NOTE; ''; a : b; c",
+        "DATE. 2013/12/13 08:50 :created {YYYY/MM/DD hh:mm}; DATE; ''; 2013/12/13 08:50; "
+            + "created {YYYY/MM/DD hh:mm}",
+        "RT.ohm.m 3.5 : res; RT; ohm.m; 3.5; res",
+        "TDEP..1IN 7 : depth; TDEP; .1IN; 7; depth",
+        "EKB .M  12.5 : kelly; EKB; M; 12.5; kelly",
+        "A B.C\t1 2\t: tabs; A B; C; 1 2; tabs",
+        "RM.OHMM_DEGF 1.30 @ 72F: mud; RM; OHMM_DEGF; 1.30 @ 72F; mud",
+        "EMPTY. :; EMPTY; ''; ''; ''"
+      })
   void headerLines(String line, String name, String unit, String value, String description) {
     HeaderLine item = wellWith(line).item(name).orElseThrow();
     assertEquals(unit, item.unit());
@@ -137,9 +139,10 @@ class LasCasesTest {
   @Test
   void oddNamesAndUnits() {
     LasFile file =
-        curves("~C\nDEPT.M : d\n+N/-S.1000 lbf : n\nAMC[0]. _ : a\n", "100 1 2\n100.5 3 4\n101 5 6\n");
-    assertEquals(List.of("DEPT", "+N/-S", "AMC[0]"),
-        file.curves().stream().map(LasCurve::name).toList());
+        curves(
+            "~C\nDEPT.M : d\n+N/-S.1000 lbf : n\nAMC[0]. _ : a\n", "100 1 2\n100.5 3 4\n101 5 6\n");
+    assertEquals(
+        List.of("DEPT", "+N/-S", "AMC[0]"), file.curves().stream().map(LasCurve::name).toList());
     assertEquals("1000 lbf", file.curves().get(1).unit());
     assertTold(file, "L73", 12);
     assertTold(file, "L74", 12);
@@ -158,10 +161,11 @@ class LasCasesTest {
   @Test
   void doubledCurvesAreNamedApartInOrder() {
     LasFile file =
-        curves("~C\nDEPT.M : d\nRT.OHMM : a\nRT_2.OHMM : b\nrt.OHMM : c\n",
+        curves(
+            "~C\nDEPT.M : d\nRT.OHMM : a\nRT_2.OHMM : b\nrt.OHMM : c\n",
             "100 1 2 3\n100.5 1 2 1\n101 1 2 1\n");
-    assertEquals(List.of("DEPT", "RT", "RT_2", "rt_3"),
-        file.curves().stream().map(LasCurve::name).toList());
+    assertEquals(
+        List.of("DEPT", "RT", "RT_2", "rt_3"), file.curves().stream().map(LasCurve::name).toList());
     assertColumn(file, "RT_3", 3, 1, 1);
     assertTold(file, "L36", 14);
   }
@@ -194,8 +198,12 @@ class LasCasesTest {
   @Test
   void labelsTellTheOrder() {
     LasFile file =
-        text(VERSION + WELL + "~C\nGR.GAPI : g\nRHOB.G/C3 : r\nDEPT.M : d\n"
-            + "~A Depth GR RHOB\n" + ROWS);
+        text(
+            VERSION
+                + WELL
+                + "~C\nGR.GAPI : g\nRHOB.G/C3 : r\nDEPT.M : d\n"
+                + "~A Depth GR RHOB\n"
+                + ROWS);
     assertPlain(file);
     assertEquals("DEPT", file.index().name());
     assertTold(file, "L30", 13);
@@ -211,8 +219,7 @@ class LasCasesTest {
 
   @Test
   void indexMayStandInAnotherColumn() {
-    LasFile file =
-        curves("~C\nGR.GAPI : g\nDEPT.M : d\n", "50 100\n60 100.5\n70 101\n");
+    LasFile file = curves("~C\nGR.GAPI : g\nDEPT.M : d\n", "50 100\n60 100.5\n70 101\n");
     assertEquals("DEPT", file.index().name());
     assertColumn(file, "GR", 50, 60, 70);
     assertTold(file, "L30", 12);
@@ -220,8 +227,7 @@ class LasCasesTest {
 
   @Test
   void contradictionWithoutLabelsIsRefused() {
-    Fault fault =
-        refused(() -> curves("~C\nGR.GAPI : g\nRHOB.G/C3 : r\nDEPT.M : d\n", ROWS));
+    Fault fault = refused(() -> curves("~C\nGR.GAPI : g\nRHOB.G/C3 : r\nDEPT.M : d\n", ROWS));
     assertEquals("L10", fault.code());
     assertEquals(13, fault.line());
   }
@@ -242,8 +248,9 @@ class LasCasesTest {
   @Test
   void upLogIsKeptAsItStands() {
     LasFile file =
-        well("~W\nSTRT.M 101 : s\nSTOP.M 100 : s\nSTEP.M -0.5 : s\nNULL. -999.25 : n\nWELL. A : w\n"
-            , "101 70 2.4\n100.5 60 2.3\n100 50 2.2\n");
+        well(
+            "~W\nSTRT.M 101 : s\nSTOP.M 100 : s\nSTEP.M -0.5 : s\nNULL. -999.25 : n\nWELL. A : w\n",
+            "101 70 2.4\n100.5 60 2.3\n100 50 2.2\n");
     assertColumn(file, "DEPT", 101, 100.5, 100);
     assertTold(file, "L80", 0);
     assertTrue(file.quirks().stream().noneMatch(Quirk::isCaution), file.quirks().toString());
@@ -275,8 +282,7 @@ class LasCasesTest {
 
   @Test
   void irregularStepWithStepZeroIsANote() {
-    LasFile file =
-        well(WELL.replace("STEP.M 0.5", "STEP.M 0"), "100 1 1\n100.3 1 1\n101 1 1\n");
+    LasFile file = well(WELL.replace("STEP.M 0.5", "STEP.M 0"), "100 1 1\n100.3 1 1\n101 1 1\n");
     assertTold(file, "L32", 19);
     assertTrue(file.quirks().stream().noneMatch(Quirk::isCaution));
   }
@@ -296,9 +302,18 @@ class LasCasesTest {
   // 14 and 15: nulls
 
   @ParameterizedTest
-  @ValueSource(strings = {
-    "-999.25", "-999.2500", "-999.25000000", "-9.9925e2", "NULL", "NaN", "(null)", "-", "n/a"
-  })
+  @ValueSource(
+      strings = {
+        "-999.25",
+        "-999.2500",
+        "-999.25000000",
+        "-9.9925e2",
+        "NULL",
+        "NaN",
+        "(null)",
+        "-",
+        "n/a"
+      })
   void declaredNullAndWordsAreMissing(String item) {
     assertColumn(rows("100 " + item + " 2.2\n100.5 60 2.3\n101 70 2.4\n"), "GR", NONE, 60, 70);
   }
@@ -315,7 +330,8 @@ class LasCasesTest {
   @CsvSource({"-9999, -9999.00", "-999.25, -999.2500", "0, 0.0", "-99999, -99999.0"})
   void nullIsComparedAsANumber(String declared, String printed) {
     LasFile file =
-        well(WELL.replace("NULL. -999.25", "NULL. " + declared),
+        well(
+            WELL.replace("NULL. -999.25", "NULL. " + declared),
             "100 1 " + printed + "\n100.5 2 1\n101 3 1\n");
     assertColumn(file, "RHOB", NONE, 1, 1);
   }
@@ -338,8 +354,10 @@ class LasCasesTest {
 
   @Test
   void nullAsIndexIsKeptWhereItFitsElseTheRowIsLeftOut() {
-    String zero = WELL.replace("NULL. -999.25", "NULL. 0").replace("STRT.M 100.0", "STRT.M -0.5")
-        .replace("STOP.M 101.0", "STOP.M 0.5");
+    String zero =
+        WELL.replace("NULL. -999.25", "NULL. 0")
+            .replace("STRT.M 100.0", "STRT.M -0.5")
+            .replace("STOP.M 101.0", "STOP.M 0.5");
     assertColumn(well(zero, "-0.5 1 1\n0.0 2 2\n0.5 3 3\n"), "DEPT", -0.5, 0, 0.5);
     LasFile file = rows("100 1 1\n-999.25 2 2\n101 3 3\n");
     assertColumn(file, "DEPT", 100, 101);
@@ -407,7 +425,8 @@ class LasCasesTest {
   }
 
   @ParameterizedTest
-  @ValueSource(strings = {"\u0001\u0002junk\u0003", "DEPT GR RHOB", "metres", "*** start *** of data ***"})
+  @ValueSource(
+      strings = {"\u0001\u0002junk\u0003", "DEPT GR RHOB", "metres", "*** start *** of data ***"})
   void strayLineBeforeTheFirstRow(String line) {
     LasFile file = rows(line + "\n" + ROWS);
     assertPlain(file);
@@ -435,7 +454,8 @@ class LasCasesTest {
 
   @Test
   void otherTextMayBeLongAndHoldTildes() {
-    String other = "~Other\n" + "Remark: a.b : c\n".repeat(500) + "~ about 5 m of fill\n~Approx 3\n";
+    String other =
+        "~Other\n" + "Remark: a.b : c\n".repeat(500) + "~ about 5 m of fill\n~Approx 3\n";
     LasFile file = text(VERSION + WELL + LasTextOf.CURVES + other + "~A\n" + ROWS);
     assertPlain(file);
     LasSection kept = file.sections().get(3);
@@ -448,8 +468,14 @@ class LasCasesTest {
   @Test
   void textsBehindTheColonInAnOldFile() {
     LasFile file =
-        text(VERSION.replace("2.0", "1.2") + WELL.replace("WELL. A-1 : WELL", "WELL. WELL : A-1: x\n"
-            + "FLD. : Tarn Hill\nCOMP. COMPANY :") + LasTextOf.CURVES + "~A\n" + ROWS);
+        text(
+            VERSION.replace("2.0", "1.2")
+                + WELL.replace(
+                    "WELL. A-1 : WELL",
+                    "WELL. WELL : A-1: x\n" + "FLD. : Tarn Hill\nCOMP. COMPANY :")
+                + LasTextOf.CURVES
+                + "~A\n"
+                + ROWS);
     assertEquals("A-1: x", file.item("WELL").orElseThrow().value());
     assertEquals("Tarn Hill", file.item("FLD").orElseThrow().value());
     assertEquals("", file.item("COMP").orElseThrow().value());
@@ -542,9 +568,9 @@ class LasCasesTest {
   }
 
   @ParameterizedTest
-  @CsvSource(delimiter = ';', value = {
-    "1.2.3; L08", "1,234.5; L14", "1,234; L14", "12,5; L14", "12a; L08", "1-2-3; L08"
-  })
+  @CsvSource(
+      delimiter = ';',
+      value = {"1.2.3; L08", "1,234.5; L14", "1,234; L14", "12,5; L14", "12a; L08", "1-2-3; L08"})
   void unclearNumbersAreRefusedWithTheirPlace(String item, String code) {
     Fault fault = refused(() -> rows("100.0 50 2.2\n100.5 " + item + " 2.3\n101.0 70 2.4\n"));
     assertEquals(code, fault.code());
@@ -554,8 +580,17 @@ class LasCasesTest {
 
   @ParameterizedTest
   @CsvSource({
-    "1.0E-03, 0.001", "1.0e+2, 100", "1.0D-03, 0.001", "1.0d2, 100", "1.0-03, 0.001", "2.5+02, 250",
-    "*****, NaN", "Inf, NaN", "-Infinity, NaN", "1.#INF, NaN", "1e999, NaN"
+    "1.0E-03, 0.001",
+    "1.0e+2, 100",
+    "1.0D-03, 0.001",
+    "1.0d2, 100",
+    "1.0-03, 0.001",
+    "2.5+02, 250",
+    "*****, NaN",
+    "Inf, NaN",
+    "-Infinity, NaN",
+    "1.#INF, NaN",
+    "1e999, NaN"
   })
   void exponentsAndOverflows(String item, double value) {
     LasFile file = rows("100.0 " + item + " 2.2\n100.5 60 2.3\n101.0 70 2.4\n");
@@ -567,7 +602,8 @@ class LasCasesTest {
   @Test
   void columnsOfTimesAndWordsAreKeptAsText() {
     LasFile file =
-        curves("~C\nDEPT.M : d\nTIM. : t\nLITH. : l\n",
+        curves(
+            "~C\nDEPT.M : d\nTIM. : t\nLITH. : l\n",
             "100 12:31:05 SAND\n100.5 12:31:06 -999.25\n101 12:31:07 \"fine sand\"\n");
     assertTrue(file.curve("TIM").orElseThrow().isText());
     assertEquals("12:31:06", file.curve("TIM").orElseThrow().word(1).orElseThrow());
@@ -591,8 +627,12 @@ class LasCasesTest {
   @Test
   void indexOfWordsIsRefused() {
     Fault fault =
-        refused(() -> text(VERSION + "~W\nNULL. -999.25 : n\nWELL. A : w\n~C\nTIME.S : t\nGR.GAPI : g\n"
-            + "~A\n12:31:05 50\n12:31:06 60\n"));
+        refused(
+            () ->
+                text(
+                    VERSION
+                        + "~W\nNULL. -999.25 : n\nWELL. A : w\n~C\nTIME.S : t\nGR.GAPI : g\n"
+                        + "~A\n12:31:05 50\n12:31:06 60\n"));
     assertTrue(List.of("L09", "L17").contains(fault.code()), fault.toString());
   }
 
@@ -621,10 +661,17 @@ class LasCasesTest {
   // 30 and 31: version and header lines
 
   @ParameterizedTest
-  @CsvSource(delimiter = ';', value = {
-    "VERS. 2.00 : v; 2.0", "VERS. 2 : v; 2.0", "VERS.2.0 : v; 2.0", "VERS. 1.20 : v; 1.2",
-    "VERS. 2.0: CWLS log; 2.0", "vers . 2.0 CWLS : v; 2.0", "VERS. 3.0 : v; 3.0"
-  })
+  @CsvSource(
+      delimiter = ';',
+      value = {
+        "VERS. 2.00 : v; 2.0",
+        "VERS. 2 : v; 2.0",
+        "VERS.2.0 : v; 2.0",
+        "VERS. 1.20 : v; 1.2",
+        "VERS. 2.0: CWLS log; 2.0",
+        "vers . 2.0 CWLS : v; 2.0",
+        "VERS. 3.0 : v; 3.0"
+      })
   void versions(String line, String version) {
     LasFile file = text(plain().replace("VERS. 2.0 : version", line));
     assertEquals(version, file.version().toString());
@@ -664,9 +711,25 @@ class LasCasesTest {
     String stop = differs ? "331.3648294" : "101.0";
     String step = differs ? "1.640419948" : "0.5";
     LasFile file =
-        text(VERSION + "~W\nSTRT." + stated + " " + start + " : s\nSTOP." + stated + " " + stop
-            + " : s\nSTEP." + stated + " " + step + " : s\nNULL. -999.25 : n\nWELL. A-1 : WELL\n"
-            + LasTextOf.CURVES.replace("DEPT.M", "DEPT." + used) + PARAMETERS + "~A\n" + ROWS);
+        text(
+            VERSION
+                + "~W\nSTRT."
+                + stated
+                + " "
+                + start
+                + " : s\nSTOP."
+                + stated
+                + " "
+                + stop
+                + " : s\nSTEP."
+                + stated
+                + " "
+                + step
+                + " : s\nNULL. -999.25 : n\nWELL. A-1 : WELL\n"
+                + LasTextOf.CURVES.replace("DEPT.M", "DEPT." + used)
+                + PARAMETERS
+                + "~A\n"
+                + ROWS);
     assertPlain(file);
     assertEquals(differs, file.quirks().stream().anyMatch(q -> q.code().equals("L49")));
   }
@@ -683,13 +746,29 @@ class LasCasesTest {
   // 24: titles
 
   @ParameterizedTest
-  @CsvSource(delimiter = ';', value = {
-    "~v;~w;~c;~p;~a", "~Version;~Well;~Curves;~Params;~Ascii | Curve", "~ V;~ W;~ C;~ P;~ A",
-    " ~VERSION:;~WELL:;~CURVE:;~PARAMETER:;~A:", "~V.x;~W.x;~C.x;~P.x;~ASCII LOG DATA"
-  })
+  @CsvSource(
+      delimiter = ';',
+      value = {
+        "~v;~w;~c;~p;~a",
+        "~Version;~Well;~Curves;~Params;~Ascii | Curve",
+        "~ V;~ W;~ C;~ P;~ A",
+        " ~VERSION:;~WELL:;~CURVE:;~PARAMETER:;~A:",
+        "~V.x;~W.x;~C.x;~P.x;~ASCII LOG DATA"
+      })
   void titles(String v, String w, String c, String p, String a) {
-    assertPlain(text(v + VERSION.substring(2) + w + WELL.substring(2) + c
-        + LasTextOf.CURVES.substring(2) + p + PARAMETERS.substring(2) + a + "\n" + ROWS));
+    assertPlain(
+        text(
+            v
+                + VERSION.substring(2)
+                + w
+                + WELL.substring(2)
+                + c
+                + LasTextOf.CURVES.substring(2)
+                + p
+                + PARAMETERS.substring(2)
+                + a
+                + "\n"
+                + ROWS));
   }
 
   @Test
@@ -709,9 +788,15 @@ class LasCasesTest {
   /** Independent: the same rows in any layout are the same numbers. */
   @Test
   void layoutsAgree() {
-    for (String row : List.of("100.0,50,2.2", "100.0\t50\t2.2", "100.0 ; 50 ; 2.2", "100.0, 50, 2.2")) {
-      String rows = row + "\n" + row.replace("100.0", "100.5").replace("50", "60").replace("2.2", "2.3")
-          + "\n" + row.replace("100.0", "101.0").replace("50", "70").replace("2.2", "2.4") + "\n";
+    for (String row :
+        List.of("100.0,50,2.2", "100.0\t50\t2.2", "100.0 ; 50 ; 2.2", "100.0, 50, 2.2")) {
+      String rows =
+          row
+              + "\n"
+              + row.replace("100.0", "100.5").replace("50", "60").replace("2.2", "2.3")
+              + "\n"
+              + row.replace("100.0", "101.0").replace("50", "70").replace("2.2", "2.4")
+              + "\n";
       assertPlain(rows(rows));
     }
   }
@@ -732,8 +817,9 @@ class LasCasesTest {
       } catch (DataException e) {
         assertTrue(e.getMessage().contains("error[L"), e.getMessage());
       } catch (RuntimeException e) {
-        throw new AssertionError("seed " + seed + ", case " + i + ": "
-            + new String(some, StandardCharsets.ISO_8859_1), e);
+        throw new AssertionError(
+            "seed " + seed + ", case " + i + ": " + new String(some, StandardCharsets.ISO_8859_1),
+            e);
       }
     }
   }

@@ -41,7 +41,8 @@ class LasHelpTest {
     }
     Set<String> pages = new TreeSet<>();
     try (Stream<Path> files = Files.list(Path.of("src/main/resources/connate/help"))) {
-      files.map(f -> f.getFileName().toString().replace(".txt", ""))
+      files
+          .map(f -> f.getFileName().toString().replace(".txt", ""))
           .filter(f -> f.matches("[LW]\\d\\d"))
           .forEach(pages::add);
     }

@@ -11,9 +11,9 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 
 /**
- * Independent: real files of the Kansas Geological Survey, the Alberta Geological Survey, FORCE 2020
- * and the first wireline log of 1927; counts and means stand in the README beside the files, where
- * they were computed with another program.
+ * Independent: real files of the Kansas Geological Survey, the Alberta Geological Survey, FORCE
+ * 2020 and the first wireline log of 1927; counts and means stand in the README beside the files,
+ * where they were computed with another program.
  */
 class LasSharedFilesTest {
 
@@ -137,8 +137,8 @@ class LasSharedFilesTest {
   @Test
   void dataSetsBesideTheLogAreRead() {
     List<LasSet> sets = read("las-kgs/1046114346.las").sets();
-    assertEquals(List.of("Tops", "IQ_Control", "IQ_Geo_Report"),
-        sets.stream().map(LasSet::name).toList());
+    assertEquals(
+        List.of("Tops", "IQ_Control", "IQ_Geo_Report"), sets.stream().map(LasSet::name).toList());
     LasSet tops = sets.get(0);
     assertEquals(17, tops.rows().size());
     assertEquals("Wellington", tops.column("TOPN").get(0));

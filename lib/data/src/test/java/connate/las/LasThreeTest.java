@@ -15,21 +15,24 @@ class LasThreeTest {
   private static final double NONE = Double.NaN;
 
   private static String file(String delimiter, String rows) {
-    return "~Version\nVERS. 3.0 : v\nWRAP. NO : w\nDLM. " + delimiter + " : d\n"
+    return "~Version\nVERS. 3.0 : v\nWRAP. NO : w\nDLM. "
+        + delimiter
+        + " : d\n"
         + "~Well\nSTRT.M 100 : s\nSTOP.M 101 : s\nSTEP.M 0.5 : s\nNULL. -999.25 : n\nWELL. A : w\n"
         + "~Log_Parameter[1]\nBS.IN 8.5 : bit {F} | RUN[1]\n"
         + "~Log_Definition[1]\nDEPT.M : depth {F}\nLITH. : rock {S}\nGR.GAPI : gamma {F10.4}\n"
-        + "~Log_Data[1] | Log_Definition[1]\n" + rows;
+        + "~Log_Data[1] | Log_Definition[1]\n"
+        + rows;
   }
 
   @ParameterizedTest
-  @CsvSource(delimiter = ';', value = {
-    "COMMA; ','", "TAB; '\t'", "SPACE; ' '", "''; ' '"
-  })
+  @CsvSource(
+      delimiter = ';',
+      value = {"COMMA; ','", "TAB; '\t'", "SPACE; ' '", "''; ' '"})
   void delimiters(String word, String delimiter) {
     String rows = "100,SAND,50\n100.5,\"Viking, upper\",60\n101,SHALE,70\n";
-    String split = rows.replace("Viking, upper", "Viking@ upper").replace(",", delimiter)
-        .replace("@", ",");
+    String split =
+        rows.replace("Viking, upper", "Viking@ upper").replace(",", delimiter).replace("@", ",");
     LasFile read = LasTextOf.text(file(word, split));
     assertArrayEquals(new double[] {50, 60, 70}, read.curve("GR").orElseThrow().values());
     assertEquals("Viking, upper", read.curve("LITH").orElseThrow().word(1).orElseThrow());
@@ -56,18 +59,22 @@ class LasThreeTest {
 
   @Test
   void setsMayStandBeforeAndBehindTheLog() {
-    String tops = "~Tops_Definition\nTOPN. : name {S}\nTOPT.M : top {F}\n"
-        + "~Tops_Data | Tops_Definition\n\"Sand, lower\",100.2\nShale,-999.25\n1,2,3\n";
-    for (String text : List.of(
-        file("COMMA", "100,SAND,50\n101,SAND,50\n") + tops,
-        file("COMMA", "100,SAND,50\n101,SAND,50\n").replace("~Log_Parameter", tops + "~Log_Parameter"))) {
+    String tops =
+        "~Tops_Definition\nTOPN. : name {S}\nTOPT.M : top {F}\n"
+            + "~Tops_Data | Tops_Definition\n\"Sand, lower\",100.2\nShale,-999.25\n1,2,3\n";
+    for (String text :
+        List.of(
+            file("COMMA", "100,SAND,50\n101,SAND,50\n") + tops,
+            file("COMMA", "100,SAND,50\n101,SAND,50\n")
+                .replace("~Log_Parameter", tops + "~Log_Parameter"))) {
       LasFile read = LasTextOf.text(text);
       assertEquals(2, read.rows());
       LasSet set = read.sets().get(0);
       assertEquals(List.of("Sand, lower", "Shale"), set.column("topn"));
       assertEquals(List.of("100.2", ""), set.column("TOPT"));
-      assertTrue(read.quirks().stream().anyMatch(
-          q -> q.code().equals("L55") && q.message().contains("row of 3 items")));
+      assertTrue(
+          read.quirks().stream()
+              .anyMatch(q -> q.code().equals("L55") && q.message().contains("row of 3 items")));
     }
   }
 

@@ -10,8 +10,8 @@ import java.nio.ByteBuffer;
 import java.util.Optional;
 
 /**
- * Frames over a pair of streams: a length of four bytes, then the message. One thread may read while
- * others write.
+ * Frames over a pair of streams: a length of four bytes, then the message. One thread may read
+ * while others write.
  */
 public final class Channel {
 

@@ -42,8 +42,7 @@ public sealed interface Event {
    * @param status whether its constants were checked
    * @param range the published range in words
    */
-  record Used(
-      String id, String title, String equation, String source, String status, String range)
+  record Used(String id, String title, String equation, String source, String status, String range)
       implements Event {}
 
   /**

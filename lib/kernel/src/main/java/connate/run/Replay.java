@@ -21,7 +21,8 @@ public final class Replay {
   }
 
   /** Runs a workbook to its end. */
-  public static ReplayOutcome run(Workbook workbook, ReplaySettings settings, ReplayWatcher watcher) {
+  public static ReplayOutcome run(
+      Workbook workbook, ReplaySettings settings, ReplayWatcher watcher) {
     return of(workbook, settings, watcher).run();
   }
 

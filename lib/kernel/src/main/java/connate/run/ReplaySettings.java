@@ -29,8 +29,7 @@ public record ReplaySettings(
   }
 
   /** The settings of a plain replay. */
-  public static final ReplaySettings PLAIN =
-      new ReplaySettings(null, Map.of(), 1, true, Way.AUTO);
+  public static final ReplaySettings PLAIN = new ReplaySettings(null, Map.of(), 1, true, Way.AUTO);
 
   /** Checks that nothing is missing. */
   public ReplaySettings {

@@ -7,8 +7,8 @@ import java.util.Set;
 
 /**
  * Tells where a command ends that begins at a given token, and what it is. It knows statements,
- * declarations and brackets; of an expression it knows only where it stops: at a semicolon, or at the
- * end of a line that nothing carries on.
+ * declarations and brackets; of an expression it knows only where it stops: at a semicolon, or at
+ * the end of a line that nothing carries on.
  */
 final class Grammar {
 
@@ -20,29 +20,140 @@ final class Grammar {
 
   private static final Set<String> MODIFIERS =
       Set.of(
-          "public", "protected", "private", "static", "final", "abstract", "default", "strictfp",
-          "transient", "volatile", "native", "synchronized");
+          "public",
+          "protected",
+          "private",
+          "static",
+          "final",
+          "abstract",
+          "default",
+          "strictfp",
+          "transient",
+          "volatile",
+          "native",
+          "synchronized");
   private static final Set<String> PRIMITIVES =
       Set.of("boolean", "byte", "short", "char", "int", "long", "float", "double", "void");
   private static final Set<String> STATEMENTS =
       Set.of(
-          "if", "for", "while", "do", "try", "switch", "synchronized", "return", "throw", "break",
-          "continue", "assert");
+          "if",
+          "for",
+          "while",
+          "do",
+          "try",
+          "switch",
+          "synchronized",
+          "return",
+          "throw",
+          "break",
+          "continue",
+          "assert");
   private static final Set<String> RESERVED =
       Set.of(
-          "new", "this", "super", "instanceof", "true", "false", "null", "case", "else", "catch",
-          "finally", "import", "package", "class", "enum", "interface", "extends", "implements",
-          "throws", "goto", "const");
+          "new",
+          "this",
+          "super",
+          "instanceof",
+          "true",
+          "false",
+          "null",
+          "case",
+          "else",
+          "catch",
+          "finally",
+          "import",
+          "package",
+          "class",
+          "enum",
+          "interface",
+          "extends",
+          "implements",
+          "throws",
+          "goto",
+          "const");
   private static final Set<String> CARRIES_ON =
       Set.of(
-          "+", "-", "*", "/", "%", "&", "|", "^", "!", "~", "?", ":", "=", "<", ">", ".", ",", "->",
-          "::", "==", "<=", ">=", "!=", "&&", "||", "+=", "-=", "*=", "/=", "%=", "&=", "|=", "^=",
-          "<<", "<<=", "new", "instanceof", "throws", "extends", "implements", "@");
+          "+",
+          "-",
+          "*",
+          "/",
+          "%",
+          "&",
+          "|",
+          "^",
+          "!",
+          "~",
+          "?",
+          ":",
+          "=",
+          "<",
+          ">",
+          ".",
+          ",",
+          "->",
+          "::",
+          "==",
+          "<=",
+          ">=",
+          "!=",
+          "&&",
+          "||",
+          "+=",
+          "-=",
+          "*=",
+          "/=",
+          "%=",
+          "&=",
+          "|=",
+          "^=",
+          "<<",
+          "<<=",
+          "new",
+          "instanceof",
+          "throws",
+          "extends",
+          "implements",
+          "@");
   private static final Set<String> CARRIED_ON =
       Set.of(
-          "+", "-", "*", "/", "%", "&", "|", "^", "?", ":", "=", "<", ">", ".", ",", "->", "::",
-          "==", "<=", ">=", "!=", "&&", "||", "+=", "-=", "*=", "/=", "%=", "&=", "|=", "^=", "<<",
-          "<<=", "instanceof", "throws", ";", ")", "]");
+          "+",
+          "-",
+          "*",
+          "/",
+          "%",
+          "&",
+          "|",
+          "^",
+          "?",
+          ":",
+          "=",
+          "<",
+          ">",
+          ".",
+          ",",
+          "->",
+          "::",
+          "==",
+          "<=",
+          ">=",
+          "!=",
+          "&&",
+          "||",
+          "+=",
+          "-=",
+          "*=",
+          "/=",
+          "%=",
+          "&=",
+          "|=",
+          "^=",
+          "<<",
+          "<<=",
+          "instanceof",
+          "throws",
+          ";",
+          ")",
+          "]");
 
   private final List<Token> tokens;
   private final Set<Integer> afterProse;

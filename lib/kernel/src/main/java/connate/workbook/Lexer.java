@@ -4,8 +4,8 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * Cuts Java into words, literals, symbols, comments and lines of prose. It never fails: what is left
- * open ends with its line or with the text, and the compiler says what is wrong with it.
+ * Cuts Java into words, literals, symbols, comments and lines of prose. It never fails: what is
+ * left open ends with its line or with the text, and the compiler says what is wrong with it.
  */
 final class Lexer {
 

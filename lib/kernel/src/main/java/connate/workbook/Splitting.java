@@ -66,9 +66,7 @@ final class Splitting {
     int line = lineOf(start);
     int column = start - text.lastIndexOf('\n', start - 1);
     String source = text.substring(start, end);
-    commands.add(
-        new Command(
-            count, kind, source, start, line, line + newlines(source), column));
+    commands.add(new Command(count, kind, source, start, line, line + newlines(source), column));
     count++;
     done = end;
   }

@@ -30,8 +30,10 @@ import org.apache.commons.math3.distribution.NormalDistribution;
  *
  * <p><b>Valid</b> for independent samples. Plugs of one core are not: draw whole cores with {@link
  * #ofGroups}.
+ *
  * <p><b>Source</b>: Efron (1987), J. Am. Stat. Assoc. 82, 171–185; Efron and Tibshirani (1993), An
  * Introduction to the Bootstrap, chapter 14.
+ *
  * <p><b>Checked</b> in {@code BootstrapTest}.
  */
 public final class Bootstrap {
@@ -82,8 +84,10 @@ public final class Bootstrap {
     Objects.requireNonNull(statistic, "statistic");
     if (groups.size() < 2 || replicates < 100) {
       throw new IllegalArgumentException(
-          "a bootstrap needs at least two samples and 100 replicates, found " + groups.size()
-              + " and " + replicates);
+          "a bootstrap needs at least two samples and 100 replicates, found "
+              + groups.size()
+              + " and "
+              + replicates);
     }
     Listening.used(CARD);
     RandomGenerator random = GENERATOR.create(seed);
@@ -97,8 +101,7 @@ public final class Bootstrap {
     }
     Arrays.sort(out);
     double[][] all = groups.toArray(new double[0][]);
-    return new Bootstrap(
-        statistic.applyAsDouble(joined(all)), out, acceleration(all, statistic));
+    return new Bootstrap(statistic.applyAsDouble(joined(all)), out, acceleration(all, statistic));
   }
 
   /** Returns the statistic of the samples as they are. */

@@ -23,8 +23,10 @@ import java.util.Arrays;
  * shrinking onto one value.
  *
  * <p><b>Valid</b> where groups are separated by more than their spread and n is some tens.
- * <p><b>Source</b>: Dempster, Laird and Rubin (1977), J. Roy. Stat. Soc. B 39, 1–38; Schwarz (1978),
- * Ann. Stat. 6, 461–464.
+ *
+ * <p><b>Source</b>: Dempster, Laird and Rubin (1977), J. Roy. Stat. Soc. B 39, 1–38; Schwarz
+ * (1978), Ann. Stat. 6, 461–464.
+ *
  * <p><b>Checked</b> in {@code GaussianMixtureTest}.
  */
 public final class GaussianMixture implements Listed {

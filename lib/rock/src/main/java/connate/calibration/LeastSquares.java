@@ -58,7 +58,11 @@ public final class LeastSquares implements Listed {
     int terms = columns.length + 1;
     if (y.length <= terms) {
       throw new IllegalArgumentException(
-          "a fit of " + terms + " coefficients needs more than " + terms + " rows, found "
+          "a fit of "
+              + terms
+              + " coefficients needs more than "
+              + terms
+              + " rows, found "
               + y.length);
     }
     double[][] rows = new double[y.length][terms];
@@ -216,13 +220,11 @@ public final class LeastSquares implements Listed {
             .column("t")
             .column("p");
     for (int i = 0; i < coefficients.length; i++) {
-      table.row(
-          names.get(i), coefficients[i], standardErrors()[i], tValues()[i], pValues()[i]);
+      table.row(names.get(i), coefficients[i], standardErrors()[i], tValues()[i], pValues()[i]);
     }
     return table
         .note("s " + Numbers.text(scatter()) + " on " + degreesOfFreedom() + " degrees of freedom")
-        .note(
-            "R² " + Numbers.text(rSquared()) + ", adjusted " + Numbers.text(adjustedRSquared()))
+        .note("R² " + Numbers.text(rSquared()) + ", adjusted " + Numbers.text(adjustedRSquared()))
         .build();
   }
 

@@ -73,8 +73,15 @@ public final class LeaveOut {
     int held = folds.stream().mapToInt(f -> f.length).sum();
     if (folds.size() < 2 || held < plugs.size()) {
       throw new IllegalArgumentException(
-          "«" + groups.name() + "» has " + folds.size() + " groups and names " + held + " of "
-              + plugs.size() + " plugs: at least two groups that name every plug are needed");
+          "«"
+              + groups.name()
+              + "» has "
+              + folds.size()
+              + " groups and names "
+              + held
+              + " of "
+              + plugs.size()
+              + " plugs: at least two groups that name every plug are needed");
     }
     return folds;
   }

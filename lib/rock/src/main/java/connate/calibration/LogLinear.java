@@ -21,8 +21,10 @@ import connate.series.Series;
  * </table>
  *
  * <p><b>Valid</b> inside the porosities of the core it was fitted to, one rock type at a time.
+ *
  * <p><b>Source</b>: common form of core analysis; Wangen (2010), Physical Principles of Sedimentary
  * Basin Analysis, Cambridge University Press, p. 18, with two published pairs of constants.
+ *
  * <p><b>Checked</b> in {@code LogLinearTest}.
  */
 public final class LogLinear {

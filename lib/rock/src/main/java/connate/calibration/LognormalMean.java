@@ -26,9 +26,11 @@ import java.util.Arrays;
  *
  * <p><b>Valid</b> for lognormal k; Swanson's rule falls below the mean by 5 % at a standard
  * deviation of ln k of 1 and by 42 % at 2, and is refused above 1.
+ *
  * <p><b>Source</b>: Sichel (1952), Trans. Inst. Min. Metall. 61, 261–288; Sichel (1966), J. S. Afr.
  * Inst. Min. Metall.; Finney (1941), J. Roy. Stat. Soc. Suppl. 7, 155–161. Swanson's rule: Hurst,
  * Brown and Swanson (2000), AAPG Bull. 84, 1883–1891.
+ *
  * <p><b>Checked</b> in {@code LognormalMeanTest}.
  */
 public final class LognormalMean {
@@ -97,7 +99,8 @@ public final class LognormalMean {
     double[] log = logs(permeability);
     Listening.used(SWANSON);
     double m = Arrays.stream(log).average().orElseThrow();
-    double s = StrictMath.sqrt(Arrays.stream(log).map(x -> (x - m) * (x - m)).sum() / (log.length - 1));
+    double s =
+        StrictMath.sqrt(Arrays.stream(log).map(x -> (x - m) * (x - m)).sum() / (log.length - 1));
     if (s > 1) {
       Listening.caution(
           Caution.of(
@@ -119,7 +122,11 @@ public final class LognormalMean {
     for (double value : k) {
       if (!(value > 0)) {
         throw new IllegalArgumentException(
-            "«" + permeability.name() + "» holds " + value + ": a lognormal mean needs values above"
+            "«"
+                + permeability.name()
+                + "» holds "
+                + value
+                + ": a lognormal mean needs values above"
                 + " zero; say what a zero stands for first");
       }
     }

@@ -36,8 +36,15 @@ final class Plugs {
     double[] k = permeability.in(Units.mD);
     if (phi.length != k.length) {
       throw new IllegalArgumentException(
-          "«" + porosity.name() + "» has " + phi.length + " rows, «" + permeability.name() + "» "
-              + k.length + ": take both from one table");
+          "«"
+              + porosity.name()
+              + "» has "
+              + phi.length
+              + " rows, «"
+              + permeability.name()
+              + "» "
+              + k.length
+              + ": take both from one table");
     }
     int[] used = new int[phi.length];
     int count = 0;
@@ -55,8 +62,13 @@ final class Plugs {
   private Plugs checked(Series porosity) {
     if (rows.length < FEWEST) {
       throw new IllegalArgumentException(
-          "a fit needs at least " + FEWEST + " plugs with porosity and permeability; of " + total
-              + " rows " + rows.length + " have both");
+          "a fit needs at least "
+              + FEWEST
+              + " plugs with porosity and permeability; of "
+              + total
+              + " rows "
+              + rows.length
+              + " have both");
     }
     double[] phi = new double[rows.length];
     double[] log = new double[rows.length];
@@ -65,8 +77,15 @@ final class Plugs {
       log[i] = StrictMath.log10(logK[rows[i]]);
       if (!(phi[i] >= 0 && phi[i] <= 1)) {
         throw new IllegalArgumentException(
-            "«" + porosity.name() + "» holds the porosity " + phi[i] + " in row " + (rows[i] + 1)
-                + ": in percent? name the unit in the header: " + porosity.name() + " [%]");
+            "«"
+                + porosity.name()
+                + "» holds the porosity "
+                + phi[i]
+                + " in row "
+                + (rows[i] + 1)
+                + ": in percent? name the unit in the header: "
+                + porosity.name()
+                + " [%]");
       }
     }
     return new Plugs(total, zeros, rows, phi, log);
@@ -78,7 +97,14 @@ final class Plugs {
     String and = permeability.traits().get(Series.STRESS);
     if (of != null && and != null && !of.equals(and)) {
       throw new IllegalArgumentException(
-          "«" + porosity.name() + "» is " + of + ", «" + permeability.name() + "» " + and
+          "«"
+              + porosity.name()
+              + "» is "
+              + of
+              + ", «"
+              + permeability.name()
+              + "» "
+              + and
               + ": correct both to the same stress before the fit");
     }
   }

@@ -22,8 +22,10 @@ import connate.series.Series;
  * </table>
  *
  * <p><b>Valid</b> inside the porosities of the core it was fitted to, one rock type at a time.
- * <p><b>Source</b>: Bourbié and Zinszner (1985), J. Geophys. Res. 90, 11524–11532, fit two such laws
- * to Fontainebleau sandstone.
+ *
+ * <p><b>Source</b>: Bourbié and Zinszner (1985), J. Geophys. Res. 90, 11524–11532, fit two such
+ * laws to Fontainebleau sandstone.
+ *
  * <p><b>Checked</b> in {@code PowerLawTest}.
  */
 public final class PowerLaw {

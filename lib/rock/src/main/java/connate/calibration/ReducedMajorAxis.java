@@ -15,7 +15,9 @@ import org.apache.commons.math3.stat.descriptive.moment.StandardDeviation;
  *
  * <p><b>Valid</b> for the relation itself; for the prediction of y from x use ordinary least
  * squares. The reverse regression of x on y never predicts.
+ *
  * <p><b>Source</b>: Kermack and Haldane (1950), Biometrika 37, 30–41.
+ *
  * <p><b>Checked</b> in {@code LinesTest}.
  *
  * @param slope the slope
@@ -48,7 +50,11 @@ public record ReducedMajorAxis(double slope, double intercept, double correlatio
 
   @Override
   public String toString() {
-    return "y = " + Numbers.text(slope) + " x + " + Numbers.text(intercept) + ", r "
+    return "y = "
+        + Numbers.text(slope)
+        + " x + "
+        + Numbers.text(intercept)
+        + ", r "
         + Numbers.text(correlation);
   }
 }

@@ -14,8 +14,10 @@ import java.util.Arrays;
  *
  * <p><b>Valid</b> while fewer than 29 % of the rows are wild. Memory grows with n²: at most 6,000
  * rows.
+ *
  * <p><b>Source</b>: Theil (1950), Proc. K. Ned. Akad. Wet. 53, 386–392; Sen (1968), J. Am. Stat.
  * Assoc. 63, 1379–1389.
+ *
  * <p><b>Checked</b> in {@code LinesTest}.
  *
  * @param slope the slope

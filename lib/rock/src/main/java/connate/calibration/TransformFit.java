@@ -25,8 +25,8 @@ import connate.series.Series;
  *
  * <pre>E[k] = median · exp((ln 10 · s)² / 2)</pre>
  *
- * <p>Duan's smearing factor, the mean of 10^e over the residuals e, needs no normality: Duan (1983),
- * J. Am. Stat. Assoc. 78, 605–610.
+ * <p>Duan's smearing factor, the mean of 10^e over the residuals e, needs no normality: Duan
+ * (1983), J. Am. Stat. Assoc. 78, 605–610.
  */
 public final class TransformFit implements Curve, Listed {
 
@@ -214,11 +214,7 @@ public final class TransformFit implements Curve, Listed {
 
   @Override
   public String toString() {
-    return equation()
-        + "   k in mD, φ as fraction; "
-        + plugs.count()
-        + "\n"
-        + scatterLine();
+    return equation() + "   k in mD, φ as fraction; " + plugs.count() + "\n" + scatterLine();
   }
 
   private String scatterLine() {

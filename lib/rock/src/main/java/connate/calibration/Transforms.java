@@ -11,7 +11,10 @@ public final class Transforms {
 
   private Transforms() {}
 
-  /** Returns the test that leaves out each group in turn, such as {@code leaveOut(plugs.labels("well"))}. */
+  /**
+   * Returns the test that leaves out each group in turn, such as {@code
+   * leaveOut(plugs.labels("well"))}.
+   */
   public static LeaveOut leaveOut(Labels groups) {
     return LeaveOut.of(groups);
   }

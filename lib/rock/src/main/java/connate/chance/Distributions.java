@@ -24,8 +24,7 @@ public final class Distributions {
 
   /** Returns the normal law of a quantity; the spread is stated in the mean's unit or another. */
   public static <Q extends Quantity<Q>> Uncertain<Q> normal(Q mean, Q standardDeviation) {
-    return new Uncertain<>(
-        normal(mean.number(), standardDeviation.in(mean.unit())), mean.unit());
+    return new Uncertain<>(normal(mean.number(), standardDeviation.in(mean.unit())), mean.unit());
   }
 
   /**
@@ -53,8 +52,14 @@ public final class Distributions {
                 StrictMath.max(
                     low, mean + standardDeviation * standard(below + p * (above - below)))),
         mean + standardDeviation * shift,
-        "normal, mean " + Numbers.text(mean) + ", sd " + Numbers.text(standardDeviation)
-            + ", between " + Numbers.text(low) + " and " + Numbers.text(high));
+        "normal, mean "
+            + Numbers.text(mean)
+            + ", sd "
+            + Numbers.text(standardDeviation)
+            + ", between "
+            + Numbers.text(low)
+            + " and "
+            + Numbers.text(high));
   }
 
   /** Returns the normal law of a quantity between two ends. */
@@ -104,8 +109,7 @@ public final class Distributions {
   public static Distribution triangular(double low, double mode, double high) {
     ordered(low, high);
     if (!(mode >= low && mode <= high)) {
-      throw new IllegalArgumentException(
-          "the mode " + mode + " is outside " + low + " to " + high);
+      throw new IllegalArgumentException("the mode " + mode + " is outside " + low + " to " + high);
     }
     double width = high - low;
     double turn = (mode - low) / width;
@@ -158,8 +162,7 @@ public final class Distributions {
   }
 
   /** A law by its quantile function. */
-  private record Law(
-      java.util.function.DoubleUnaryOperator inverse, double mean, String words)
+  private record Law(java.util.function.DoubleUnaryOperator inverse, double mean, String words)
       implements Distribution {
 
     @Override

@@ -22,7 +22,8 @@ public final class Quantiles {
       throw new IllegalArgumentException(
           "a quantile of " + sorted.length + " values at " + probability);
     }
-    double at = StrictMath.min(sorted.length - 1.0, Math.max(0, rule.position(sorted.length, probability)));
+    double at =
+        StrictMath.min(sorted.length - 1.0, Math.max(0, rule.position(sorted.length, probability)));
     int below = (int) at;
     int above = Math.min(sorted.length - 1, below + 1);
     return sorted[below] + (at - below) * (sorted[above] - sorted[below]);

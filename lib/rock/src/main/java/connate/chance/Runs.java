@@ -84,7 +84,9 @@ public final class Runs implements Listed {
     return results.values().iterator().next().size();
   }
 
-  /** Runs the calculation once more with chosen probabilities for the inputs, 0.5 for the others. */
+  /**
+   * Runs the calculation once more with chosen probabilities for the inputs, 0.5 for the others.
+   */
   Outcome at(Map<String, Double> probabilities) {
     return calculation.apply(new Draw(0, name -> probabilities.getOrDefault(name, 0.5)));
   }
@@ -100,8 +102,7 @@ public final class Runs implements Listed {
             .column("10 % exceed");
     results.forEach(
         (name, s) ->
-            table.row(
-                name, s.mean(), s.exceededBy(90), s.exceededBy(50), s.exceededBy(10)));
+            table.row(name, s.mean(), s.exceededBy(90), s.exceededBy(50), s.exceededBy(10)));
     laws.forEach((name, law) -> table.note(name + ": " + law.words()));
     return table.build();
   }
@@ -111,8 +112,7 @@ public final class Runs implements Listed {
     return listing().toString();
   }
 
-  private static Sample sample(
-      String name, Unit<?> unit, List<Simulation.Realisation> done) {
+  private static Sample sample(String name, Unit<?> unit, List<Simulation.Realisation> done) {
     double[] values = new double[done.size()];
     for (int run = 0; run < values.length; run++) {
       Quantity<?> value = done.get(run).outcome().values().get(name);

@@ -52,9 +52,7 @@ public final class Sample implements Series {
     return new Exceedance(
         name(),
         sorted.length,
-        Arrays.stream(percents)
-            .mapToObj(p -> new Exceedance.Point(p, exceededBy(p)))
-            .toList());
+        Arrays.stream(percents).mapToObj(p -> new Exceedance.Point(p, exceededBy(p))).toList());
   }
 
   /** Returns the mean, with the standard error that comes from the number of runs. */

@@ -83,8 +83,7 @@ public record Sobol(String result, int runs, List<Index> inputs) implements List
         total += (a[row] - mixed[i][row]) * (a[row] - mixed[i][row]);
       }
       out[i] =
-          new Index(
-              names.get(i), first / a.length / variance, total / (2 * a.length) / variance);
+          new Index(names.get(i), first / a.length / variance, total / (2 * a.length) / variance);
     }
     return new Sobol(result, a.length, List.of(out));
   }

@@ -19,7 +19,12 @@ public final class NoConvergence extends RuntimeException {
    */
   public NoConvergence(String what, int iterations, double residual, double best) {
     super(
-        what + " did not settle in " + iterations + " steps: residual " + residual + ", best "
+        what
+            + " did not settle in "
+            + iterations
+            + " steps: residual "
+            + residual
+            + ", best "
             + best);
     this.iterations = iterations;
     this.residual = residual;

@@ -93,8 +93,7 @@ public final class Formula<R extends Quantity<R>> {
   }
 
   /** Binds arithmetic of any number of inputs to its card. */
-  public static <R extends Quantity<R>> Formula<R> ofAny(
-      MethodCard card, Unit<R> unit, OfAny f) {
+  public static <R extends Quantity<R>> Formula<R> ofAny(MethodCard card, Unit<R> unit, OfAny f) {
     return new Formula<>(card, unit, -1, Loop.ofAny(f));
   }
 
@@ -138,8 +137,8 @@ public final class Formula<R extends Quantity<R>> {
   /**
    * Returns the column of results; a quantity among the operands stands in every row.
    *
-   * @throws IllegalArgumentException if no operand is a column, two differ in length, an input is of
-   *     another dimension, or no row is possible
+   * @throws IllegalArgumentException if no operand is a column, two differ in length, an input is
+   *     of another dimension, or no row is possible
    */
   public Series series(Operand... operands) {
     checkCount(operands.length);

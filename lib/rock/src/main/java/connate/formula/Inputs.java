@@ -1,6 +1,5 @@
 package connate.formula;
 
-import java.util.Locale;
 import connate.method.Caution;
 import connate.method.Listening;
 import connate.method.MethodCard;
@@ -14,6 +13,7 @@ import connate.quantity.Ratio;
 import connate.quantity.Unit;
 import connate.series.Series;
 import java.util.List;
+import java.util.Locale;
 import java.util.StringJoiner;
 
 /** Checks and conversions of a method's inputs. */
@@ -40,8 +40,14 @@ final class Inputs {
         from.dimension() == Fraction.DIMENSION && input.unit().dimension() == Ratio.DIMENSION;
     if (from.dimension() != input.unit().dimension() && !pure) {
       throw new IllegalArgumentException(
-          String.format(Locale.ROOT, "%s: %s must be a %s, found the %s %s",
-              card.title(), input.name(), input.unit().dimension(), from.dimension(), quantity));
+          String.format(
+              Locale.ROOT,
+              "%s: %s must be a %s, found the %s %s",
+              card.title(),
+              input.name(),
+              input.unit().dimension(),
+              from.dimension(),
+              quantity));
     }
     return from.convert(quantity.number(), input.unit());
   }
@@ -49,8 +55,13 @@ final class Inputs {
   static double[] column(MethodCard card, MethodInput input, Series series, int size) {
     if (series.size() != size) {
       throw new IllegalArgumentException(
-          String.format(Locale.ROOT, "%s: «%s» has %d rows, the first column %d",
-              card.title(), series.name(), series.size(), size));
+          String.format(
+              Locale.ROOT,
+              "%s: «%s» has %d rows, the first column %d",
+              card.title(),
+              series.name(),
+              series.size(),
+              size));
     }
     try {
       return series.in(input.unit());
@@ -72,8 +83,7 @@ final class Inputs {
     }
     StringJoiner wanted = new StringJoiner(", ");
     card.inputs().forEach(i -> wanted.add(i.name() + " (" + i.unit().dimension() + ")"));
-    throw new IllegalArgumentException(
-        card.title() + " takes " + wanted + "; found " + found);
+    throw new IllegalArgumentException(card.title() + " takes " + wanted + "; found " + found);
   }
 
   static void check(MethodCard card, MethodInput input, double value) {
@@ -81,7 +91,8 @@ final class Inputs {
       throw new IllegalArgumentException(impossible(card, input, value));
     }
     if (!input.valid().contains(value)) {
-      Listening.caution(Caution.of(OUTSIDE, card.id() + "/" + input.name(), outside(card, input, value)));
+      Listening.caution(
+          Caution.of(OUTSIDE, card.id() + "/" + input.name(), outside(card, input, value)));
     }
   }
 
@@ -129,8 +140,15 @@ final class Inputs {
           Caution.of(
               OUTSIDE,
               card.id() + "/" + input.name(),
-              String.format(Locale.ROOT, "%s: %d of %d rows have a %s outside the method's range %s%s",
-                  card.title(), flagged, kept, input.name(), valid, input.unit().suffix())));
+              String.format(
+                  Locale.ROOT,
+                  "%s: %d of %d rows have a %s outside the method's range %s%s",
+                  card.title(),
+                  flagged,
+                  kept,
+                  input.name(),
+                  valid,
+                  input.unit().suffix())));
     }
   }
 
@@ -138,14 +156,21 @@ final class Inputs {
       MethodCard card, MethodInput input, int refused, int kept, int row, double value) {
     if (kept < refused) {
       throw new IllegalArgumentException(
-          String.format(Locale.ROOT, "%s; so are %d of %d rows, the first in row %d",
-              impossible(card, input, value), refused, refused + kept, row + 1));
+          String.format(
+              Locale.ROOT,
+              "%s; so are %d of %d rows, the first in row %d",
+              impossible(card, input, value),
+              refused,
+              refused + kept,
+              row + 1));
     }
     Listening.caution(
         Caution.of(
             IMPOSSIBLE,
             card.id() + "/" + input.name(),
-            String.format(Locale.ROOT, "%s: %d of %d rows have an impossible %s and give no value; the first is %s in row"
+            String.format(
+                Locale.ROOT,
+                "%s: %d of %d rows have an impossible %s and give no value; the first is %s in row"
                     + " %d",
                 card.title(),
                 refused,
@@ -160,7 +185,9 @@ final class Inputs {
         input.unit().dimension() == Fraction.DIMENSION && value > 1 && input.unit().isPure()
             ? ": in percent? write percent(" + Numbers.text(value) + ")"
             : "";
-    return String.format(Locale.ROOT, "%s: %s %s is impossible, expected %s%s%s",
+    return String.format(
+        Locale.ROOT,
+        "%s: %s %s is impossible, expected %s%s%s",
         card.title(),
         input.name(),
         Numbers.text(value) + input.unit().suffix(),
@@ -170,7 +197,9 @@ final class Inputs {
   }
 
   private static String outside(MethodCard card, MethodInput input, double value) {
-    return String.format(Locale.ROOT, "%s: %s %s is outside the method's range %s%s",
+    return String.format(
+        Locale.ROOT,
+        "%s: %s %s is outside the method's range %s%s",
         card.title(),
         input.name(),
         Numbers.text(value) + input.unit().suffix(),

@@ -81,8 +81,7 @@ interface Loop {
         int dc = step(same[2]);
         int dd = step(same[3]);
         for (int row = 0; row < out.length; row++) {
-          out[row] =
-              f.at(in[0][row * da], in[1][row * db], in[2][row * dc], in[3][row * dd]);
+          out[row] = f.at(in[0][row * da], in[1][row * db], in[2][row * dc], in[3][row * dd]);
         }
       }
     };

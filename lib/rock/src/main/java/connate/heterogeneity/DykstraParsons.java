@@ -14,8 +14,8 @@ import java.util.List;
 import org.apache.commons.math3.distribution.NormalDistribution;
 
 /**
- * The coefficient of permeability variation of Dykstra and Parsons: 0 for a uniform rock, near 1 for
- * a very uneven one.
+ * The coefficient of permeability variation of Dykstra and Parsons: 0 for a uniform rock, near 1
+ * for a very uneven one.
  *
  * <pre>V = (k50 − k84.1) / k50 = 1 − exp(−σ)</pre>
  *
@@ -30,8 +30,10 @@ import org.apache.commons.math3.distribution.NormalDistribution;
  *
  * <p><b>Valid</b> for lognormal permeability of samples of equal support. Permeability from a
  * transform varies less than rock does, so its V is a lower value.
+ *
  * <p><b>Source</b>: Dykstra and Parsons (1950), Secondary Recovery of Oil in the United States, 2nd
  * ed., American Petroleum Institute, 160–174.
+ *
  * <p><b>Checked</b> in {@code DykstraParsonsTest}.
  */
 public final class DykstraParsons {
@@ -84,7 +86,9 @@ public final class DykstraParsons {
           Caution.of(
               ZEROS,
               CARD.id(),
-              (k.length - log.length) + " of " + k.length
+              (k.length - log.length)
+                  + " of "
+                  + k.length
                   + " permeabilities are not above zero and are left out: V is a lower value"));
     }
     double[] score = new double[log.length];

@@ -29,8 +29,10 @@ import java.util.stream.IntStream;
  * the top down, so that its slope shows the speed of each flow unit, and its area may be negative.
  *
  * <p><b>Valid</b> for layers of one reservoir; few layers underestimate L.
+ *
  * <p><b>Source</b>: Schmalz and Rahme (1950), Producers Monthly 15(9), 9–12; in depth order: Gunter
  * and others (1997), SPE 38679.
+ *
  * <p><b>Checked</b> in {@code LorenzTest}.
  */
 public final class Lorenz implements Listed {
@@ -107,8 +109,13 @@ public final class Lorenz implements Listed {
     double[] thick = h.in(Units.m);
     if (perm.length != por.length || perm.length != thick.length) {
       throw new IllegalArgumentException(
-          "permeability, porosity and thickness have " + perm.length + ", " + por.length + " and "
-              + thick.length + " rows");
+          "permeability, porosity and thickness have "
+              + perm.length
+              + ", "
+              + por.length
+              + " and "
+              + thick.length
+              + " rows");
     }
     int[] order =
         IntStream.range(0, perm.length)

@@ -24,7 +24,9 @@ import org.apache.commons.math3.stat.StatUtils;
  *
  * <p><b>Valid</b> for independent samples; Cv from fewer than N0 samples comes out too low. The
  * exact factor is (1.96/0.2)² = 96.04, which the rule rounds to 100.
+ *
  * <p><b>Source</b>: Corbett and Jensen (1992), First Break 10, 11–20; classes from memory.
+ *
  * <p><b>Checked</b> in {@code VariationTest}.
  *
  * @param coefficient the coefficient of variation
@@ -82,7 +84,14 @@ public record Variation(double coefficient, int samples) {
 
   @Override
   public String toString() {
-    return "Cv " + Numbers.text(coefficient) + ", " + grade() + "; " + samples + " samples, "
-        + samplesNeeded() + " needed for a mean within 20 %";
+    return "Cv "
+        + Numbers.text(coefficient)
+        + ", "
+        + grade()
+        + "; "
+        + samples
+        + " samples, "
+        + samplesNeeded()
+        + " needed for a mean within 20 %";
   }
 }

@@ -119,8 +119,7 @@ public record MethodCard(
       MethodInput input = inputs.get(last);
       inputs.set(
           last,
-          new MethodInput(
-              input.symbol(), input.name(), input.unit(), input.possible(), range));
+          new MethodInput(input.symbol(), input.name(), input.unit(), input.possible(), range));
       return this;
     }
 

@@ -11,8 +11,7 @@ import connate.quantity.Unit;
  * @param possible outside it the input is impossible and is refused
  * @param valid outside it the method was not calibrated: it computes, and says so
  */
-public record MethodInput(
-    String symbol, String name, Unit<?> unit, Range possible, Range valid) {
+public record MethodInput(String symbol, String name, Unit<?> unit, Range possible, Range valid) {
 
   /** Returns the published range in words, empty where none is stated. */
   public String range() {

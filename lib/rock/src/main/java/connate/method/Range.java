@@ -74,7 +74,9 @@ public record Range(double low, double high, boolean lowOpen, boolean highOpen) 
     if (!bounded) {
       return (lowOpen ? "above " : "from ") + Numbers.text(low);
     }
-    return (lowOpen ? "above " : "") + Numbers.text(low) + (highOpen ? " to below " : " to ")
+    return (lowOpen ? "above " : "")
+        + Numbers.text(low)
+        + (highOpen ? " to below " : " to ")
         + Numbers.text(high);
   }
 }

@@ -4,8 +4,7 @@ package connate.quantity;
 public final class Angle extends Scalable<Angle> {
 
   /** The dimension, under which the units are registered. */
-  public static final Dimension<Angle> DIMENSION =
-      new Dimension<>("angle", Angle::new);
+  public static final Dimension<Angle> DIMENSION = new Dimension<>("angle", Angle::new);
 
   private Angle(double value, Unit<Angle> unit) {
     super(value, unit);

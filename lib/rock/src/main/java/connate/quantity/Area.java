@@ -4,8 +4,7 @@ package connate.quantity;
 public final class Area extends Scalable<Area> {
 
   /** The dimension, under which the units are registered. */
-  public static final Dimension<Area> DIMENSION =
-      new Dimension<>("area", Area::new);
+  public static final Dimension<Area> DIMENSION = new Dimension<>("area", Area::new);
 
   private Area(double value, Unit<Area> unit) {
     super(value, unit);

@@ -4,8 +4,7 @@ package connate.quantity;
 public final class Density extends Scalable<Density> {
 
   /** The dimension, under which the units are registered. */
-  public static final Dimension<Density> DIMENSION =
-      new Dimension<>("density", Density::new);
+  public static final Dimension<Density> DIMENSION = new Dimension<>("density", Density::new);
 
   private Density(double value, Unit<Density> unit) {
     super(value, unit);

@@ -4,8 +4,7 @@ package connate.quantity;
 public final class Fraction extends Scalable<Fraction> {
 
   /** The dimension, under which the units are registered. */
-  public static final Dimension<Fraction> DIMENSION =
-      new Dimension<>("fraction", Fraction::new);
+  public static final Dimension<Fraction> DIMENSION = new Dimension<>("fraction", Fraction::new);
 
   private Fraction(double value, Unit<Fraction> unit) {
     super(value, unit);

@@ -4,8 +4,7 @@ package connate.quantity;
 public final class GammaRay extends Scalable<GammaRay> {
 
   /** The dimension, under which the units are registered. */
-  public static final Dimension<GammaRay> DIMENSION =
-      new Dimension<>("gamma ray", GammaRay::new);
+  public static final Dimension<GammaRay> DIMENSION = new Dimension<>("gamma ray", GammaRay::new);
 
   private GammaRay(double value, Unit<GammaRay> unit) {
     super(value, unit);

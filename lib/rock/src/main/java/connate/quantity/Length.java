@@ -4,8 +4,7 @@ package connate.quantity;
 public final class Length extends Scalable<Length> {
 
   /** The dimension, under which the units are registered. */
-  public static final Dimension<Length> DIMENSION =
-      new Dimension<>("length", Length::new);
+  public static final Dimension<Length> DIMENSION = new Dimension<>("length", Length::new);
 
   private Length(double value, Unit<Length> unit) {
     super(value, unit);

@@ -4,8 +4,7 @@ package connate.quantity;
 public final class Pressure extends Scalable<Pressure> {
 
   /** The dimension, under which the units are registered. */
-  public static final Dimension<Pressure> DIMENSION =
-      new Dimension<>("pressure", Pressure::new);
+  public static final Dimension<Pressure> DIMENSION = new Dimension<>("pressure", Pressure::new);
 
   private Pressure(double value, Unit<Pressure> unit) {
     super(value, unit);

@@ -4,8 +4,7 @@ package connate.quantity;
 public final class Rate extends Scalable<Rate> {
 
   /** The dimension, under which the units are registered. */
-  public static final Dimension<Rate> DIMENSION =
-      new Dimension<>("rate", Rate::new);
+  public static final Dimension<Rate> DIMENSION = new Dimension<>("rate", Rate::new);
 
   private Rate(double value, Unit<Rate> unit) {
     super(value, unit);

@@ -4,11 +4,9 @@ package connate.quantity;
 public final class Ratio extends Scalable<Ratio> {
 
   /** The dimension, under which the units are registered. */
-  public static final Dimension<Ratio> DIMENSION =
-      new Dimension<>("number", Ratio::new);
+  public static final Dimension<Ratio> DIMENSION = new Dimension<>("number", Ratio::new);
 
-  private static final Unit<Ratio> UNSTATED =
-      new Unit<>(DIMENSION, "?", 1, 0, java.util.List.of());
+  private static final Unit<Ratio> UNSTATED = new Unit<>(DIMENSION, "?", 1, 0, java.util.List.of());
 
   private Ratio(double value, Unit<Ratio> unit) {
     super(value, unit);

@@ -4,8 +4,7 @@ package connate.quantity;
 public final class Slowness extends Scalable<Slowness> {
 
   /** The dimension, under which the units are registered. */
-  public static final Dimension<Slowness> DIMENSION =
-      new Dimension<>("slowness", Slowness::new);
+  public static final Dimension<Slowness> DIMENSION = new Dimension<>("slowness", Slowness::new);
 
   private Slowness(double value, Unit<Slowness> unit) {
     super(value, unit);

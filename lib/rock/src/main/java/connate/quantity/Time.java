@@ -4,8 +4,7 @@ package connate.quantity;
 public final class Time extends Scalable<Time> {
 
   /** The dimension, under which the units are registered. */
-  public static final Dimension<Time> DIMENSION =
-      new Dimension<>("time", Time::new);
+  public static final Dimension<Time> DIMENSION = new Dimension<>("time", Time::new);
 
   private Time(double value, Unit<Time> unit) {
     super(value, unit);

@@ -6,8 +6,8 @@ package connate.quantity;
  *
  * <p>Exact factors: foot 0.3048 m, inch 25.4 mm, barrel 42 US gallons of 231 cubic inches, pound
  * force per square inch from the avoirdupois pound and standard gravity, standard atmosphere 101325
- * Pa (NIST SP 811, appendix B). The darcy is 1 cP·cm²/(s·atm), that is 1e-7/101325 m². A year is the
- * Julian year of 365.25 days.
+ * Pa (NIST SP 811, appendix B). The darcy is 1 cP·cm²/(s·atm), that is 1e-7/101325 m². A year is
+ * the Julian year of 365.25 days.
  */
 public final class Units {
 
@@ -26,56 +26,46 @@ public final class Units {
       Length.DIMENSION.unit("km", 1000, 0, "kilometre", "kilometres", "kilometer");
 
   /** The unit cm of Length. */
-  public static final Unit<Length> cm =
-      Length.DIMENSION.unit("cm", 0.01, 0, "centimetre");
+  public static final Unit<Length> cm = Length.DIMENSION.unit("cm", 0.01, 0, "centimetre");
 
   /** The unit mm of Length. */
-  public static final Unit<Length> mm =
-      Length.DIMENSION.unit("mm", 0.001, 0, "millimetre");
+  public static final Unit<Length> mm = Length.DIMENSION.unit("mm", 0.001, 0, "millimetre");
 
   /** The unit µm of Length. */
   public static final Unit<Length> um =
-      Length.DIMENSION.unit("µm", 1e-6, 0, "um", "μm", "micron", "microns", "micrometre", "micrometer");
+      Length.DIMENSION.unit(
+          "µm", 1e-6, 0, "um", "μm", "micron", "microns", "micrometre", "micrometer");
 
   /** The unit nm of Length. */
-  public static final Unit<Length> nm =
-      Length.DIMENSION.unit("nm", 1e-9, 0, "nanometre");
+  public static final Unit<Length> nm = Length.DIMENSION.unit("nm", 1e-9, 0, "nanometre");
 
   /** The unit ft of Length. */
-  public static final Unit<Length> ft =
-      Length.DIMENSION.unit("ft", 0.3048, 0, "f", "feet", "foot");
+  public static final Unit<Length> ft = Length.DIMENSION.unit("ft", 0.3048, 0, "f", "feet", "foot");
 
   /** The unit in of Length. */
   public static final Unit<Length> inches =
       Length.DIMENSION.unit("in", 0.0254, 0, "inch", "inches");
 
   /** The unit .1in of Length. */
-  public static final Unit<Length> tenthInches =
-      Length.DIMENSION.unit(".1in", 0.00254, 0, "0.1in");
+  public static final Unit<Length> tenthInches = Length.DIMENSION.unit(".1in", 0.00254, 0, "0.1in");
 
   /** The unit m² of Area. */
-  public static final Unit<Area> m2 =
-      Area.DIMENSION.unit("m²", 1, 0, "m2", "sqm");
+  public static final Unit<Area> m2 = Area.DIMENSION.unit("m²", 1, 0, "m2", "sqm");
 
   /** The unit km² of Area. */
-  public static final Unit<Area> km2 =
-      Area.DIMENSION.unit("km²", 1e6, 0, "km2");
+  public static final Unit<Area> km2 = Area.DIMENSION.unit("km²", 1e6, 0, "km2");
 
   /** The unit cm² of Area. */
-  public static final Unit<Area> cm2 =
-      Area.DIMENSION.unit("cm²", 1e-4, 0, "cm2");
+  public static final Unit<Area> cm2 = Area.DIMENSION.unit("cm²", 1e-4, 0, "cm2");
 
   /** The unit ft² of Area. */
-  public static final Unit<Area> ft2 =
-      Area.DIMENSION.unit("ft²", 0.09290304, 0, "ft2", "sqft");
+  public static final Unit<Area> ft2 = Area.DIMENSION.unit("ft²", 0.09290304, 0, "ft2", "sqft");
 
   /** The unit m³ of Volume. */
-  public static final Unit<Volume> m3 =
-      Volume.DIMENSION.unit("m³", 1, 0, "m3", "cubm");
+  public static final Unit<Volume> m3 = Volume.DIMENSION.unit("m³", 1, 0, "m3", "cubm");
 
   /** The unit cm³ of Volume. */
-  public static final Unit<Volume> cm3 =
-      Volume.DIMENSION.unit("cm³", 1e-6, 0, "cm3", "cc", "ml");
+  public static final Unit<Volume> cm3 = Volume.DIMENSION.unit("cm³", 1e-6, 0, "cm3", "cc", "ml");
 
   /** The unit L of Volume. */
   public static final Unit<Volume> litres =
@@ -90,24 +80,20 @@ public final class Units {
       Volume.DIMENSION.unit("ft³", 0.028316846592, 0, "ft3", "cuft");
 
   /** The unit s of Time. */
-  public static final Unit<Time> s =
-      Time.DIMENSION.unit("s", 1, 0, "sec", "second", "seconds");
+  public static final Unit<Time> s = Time.DIMENSION.unit("s", 1, 0, "sec", "second", "seconds");
 
   /** The unit ms of Time. */
   public static final Unit<Time> ms =
       Time.DIMENSION.unit("ms", 0.001, 0, "msec", "millisecond", "milliseconds");
 
   /** The unit min of Time. */
-  public static final Unit<Time> minutes =
-      Time.DIMENSION.unit("min", 60, 0, "minute", "minutes");
+  public static final Unit<Time> minutes = Time.DIMENSION.unit("min", 60, 0, "minute", "minutes");
 
   /** The unit h of Time. */
-  public static final Unit<Time> hours =
-      Time.DIMENSION.unit("h", 3600, 0, "hr", "hour", "hours");
+  public static final Unit<Time> hours = Time.DIMENSION.unit("h", 3600, 0, "hr", "hour", "hours");
 
   /** The unit d of Time. */
-  public static final Unit<Time> days =
-      Time.DIMENSION.unit("d", 86400, 0, "day", "days");
+  public static final Unit<Time> days = Time.DIMENSION.unit("d", 86400, 0, "day", "days");
 
   /** The unit yr of Time. */
   public static final Unit<Time> years =
@@ -118,36 +104,29 @@ public final class Units {
       Time.DIMENSION.unit("Ma", 1e6 * SECONDS_PER_YEAR, 0, "my", "myr");
 
   /** The unit Pa of Pressure. */
-  public static final Unit<Pressure> Pa =
-      Pressure.DIMENSION.unit("Pa", 1, 0, "pascal");
+  public static final Unit<Pressure> Pa = Pressure.DIMENSION.unit("Pa", 1, 0, "pascal");
 
   /** The unit kPa of Pressure. */
-  public static final Unit<Pressure> kPa =
-      Pressure.DIMENSION.unit("kPa", 1e3, 0, "kpaa");
+  public static final Unit<Pressure> kPa = Pressure.DIMENSION.unit("kPa", 1e3, 0, "kpaa");
 
   /** The unit MPa of Pressure. */
-  public static final Unit<Pressure> MPa =
-      Pressure.DIMENSION.unit("MPa", 1e6, 0, "mpaa");
+  public static final Unit<Pressure> MPa = Pressure.DIMENSION.unit("MPa", 1e6, 0, "mpaa");
 
   /** The unit GPa of Pressure. */
-  public static final Unit<Pressure> GPa =
-      Pressure.DIMENSION.unit("GPa", 1e9, 0);
+  public static final Unit<Pressure> GPa = Pressure.DIMENSION.unit("GPa", 1e9, 0);
 
   /** The unit bar of Pressure. */
-  public static final Unit<Pressure> bar =
-      Pressure.DIMENSION.unit("bar", 1e5, 0, "bara", "bars");
+  public static final Unit<Pressure> bar = Pressure.DIMENSION.unit("bar", 1e5, 0, "bara", "bars");
 
   /** The unit psi of Pressure. */
   public static final Unit<Pressure> psi =
       Pressure.DIMENSION.unit("psi", 6894.757293168361, 0, "psia", "lbf/in2");
 
   /** The unit atm of Pressure. */
-  public static final Unit<Pressure> atm =
-      Pressure.DIMENSION.unit("atm", 101325, 0, "atmosphere");
+  public static final Unit<Pressure> atm = Pressure.DIMENSION.unit("atm", 101325, 0, "atmosphere");
 
   /** The unit K of Temperature. */
-  public static final Unit<Temperature> K =
-      Temperature.DIMENSION.unit("K", 1, 0, "kelvin", "degk");
+  public static final Unit<Temperature> K = Temperature.DIMENSION.unit("K", 1, 0, "kelvin", "degk");
 
   /** The unit °C of Temperature. */
   public static final Unit<Temperature> degC =
@@ -158,8 +137,7 @@ public final class Units {
       Temperature.DIMENSION.unit("°F", 5.0 / 9.0, 459.67, "degf", "deg.f", "fahrenheit", "f");
 
   /** The unit Pa·s of Viscosity. */
-  public static final Unit<Viscosity> PaS =
-      Viscosity.DIMENSION.unit("Pa·s", 1, 0, "pa.s", "pas");
+  public static final Unit<Viscosity> PaS = Viscosity.DIMENSION.unit("Pa·s", 1, 0, "pa.s", "pas");
 
   /** The unit mPa·s of Viscosity. */
   public static final Unit<Viscosity> mPaS =
@@ -175,7 +153,8 @@ public final class Units {
 
   /** The unit g/cm³ of Density. */
   public static final Unit<Density> gPerCm3 =
-      Density.DIMENSION.unit("g/cm³", 1000, 0, "g/cm3", "g/cc", "gm/cc", "g/c3", "gcc", "gm/c3", "gm/cm3", "g/ml");
+      Density.DIMENSION.unit(
+          "g/cm³", 1000, 0, "g/cm3", "g/cc", "gm/cc", "g/c3", "gcc", "gm/c3", "gm/cm3", "g/ml");
 
   /** The unit lb/ft³ of Density. */
   public static final Unit<Density> lbPerFt3 =
@@ -215,7 +194,8 @@ public final class Units {
 
   /** The unit mD·ft of PermeabilityThickness. */
   public static final Unit<PermeabilityThickness> mDft =
-      PermeabilityThickness.DIMENSION.unit("mD·ft", 1e-3 * DARCY * 0.3048, 0, "md.ft", "md-ft", "mdft");
+      PermeabilityThickness.DIMENSION.unit(
+          "mD·ft", 1e-3 * DARCY * 0.3048, 0, "md.ft", "md-ft", "mdft");
 
   /** The unit m³ of PermeabilityThickness. */
   public static final Unit<PermeabilityThickness> kh =
@@ -250,8 +230,7 @@ public final class Units {
       Transmissivity.DIMENSION.unit("ft²/d", 0.09290304 / 86400, 0, "ft2/d", "ft2/day");
 
   /** The unit m³/s of Rate. */
-  public static final Unit<Rate> m3PerSecond =
-      Rate.DIMENSION.unit("m³/s", 1, 0, "m3/s");
+  public static final Unit<Rate> m3PerSecond = Rate.DIMENSION.unit("m³/s", 1, 0, "m3/s");
 
   /** The unit m³/d of Rate. */
   public static final Unit<Rate> m3PerDay =
@@ -262,8 +241,7 @@ public final class Units {
       Rate.DIMENSION.unit("m³/h", 1.0 / 3600, 0, "m3/h", "m3/hr");
 
   /** The unit L/s of Rate. */
-  public static final Unit<Rate> litresPerSecond =
-      Rate.DIMENSION.unit("L/s", 1e-3, 0, "l/s");
+  public static final Unit<Rate> litresPerSecond = Rate.DIMENSION.unit("L/s", 1e-3, 0, "l/s");
 
   /** The unit cm³/s of Rate. */
   public static final Unit<Rate> cm3PerSecond =
@@ -294,8 +272,7 @@ public final class Units {
       Velocity.DIMENSION.unit("m/yr", 1.0 / SECONDS_PER_YEAR, 0, "m/a", "m/year");
 
   /** The unit rad of Angle. */
-  public static final Unit<Angle> radians =
-      Angle.DIMENSION.unit("rad", 1, 0, "radian", "radians");
+  public static final Unit<Angle> radians = Angle.DIMENSION.unit("rad", 1, 0, "radian", "radians");
 
   /** The unit ° of Angle. */
   public static final Unit<Angle> degrees =
@@ -311,31 +288,41 @@ public final class Units {
 
   /** The unit fraction of Fraction. */
   public static final Unit<Fraction> fraction =
-      Fraction.DIMENSION.unit("fraction", 1, 0, "v/v", "frac", "dec", "decimal", "m3/m3", "ft3/ft3", "cfcf", "g/g", "pu/100");
+      Fraction.DIMENSION.unit(
+          "fraction",
+          1,
+          0,
+          "v/v",
+          "frac",
+          "dec",
+          "decimal",
+          "m3/m3",
+          "ft3/ft3",
+          "cfcf",
+          "g/g",
+          "pu/100");
 
   /** The unit % of Fraction. */
   public static final Unit<Fraction> percent =
       Fraction.DIMENSION.unit("%", 0.01, 0, "pct", "percent", "p.u.", "pu", "vol%", "wt%");
 
   /** The unit ppm of Fraction. */
-  public static final Unit<Fraction> ppm =
-      Fraction.DIMENSION.unit("ppm", 1e-6, 0);
+  public static final Unit<Fraction> ppm = Fraction.DIMENSION.unit("ppm", 1e-6, 0);
 
   /** The unit 1 of Ratio. */
   public static final Unit<Ratio> number =
       Ratio.DIMENSION.unit("1", 1, 0, "number", "unitless", "dimensionless");
 
   /** The unit decades of Ratio. */
-  public static final Unit<Ratio> decades =
-      Ratio.DIMENSION.unit("decades", 1, 0, "decade");
+  public static final Unit<Ratio> decades = Ratio.DIMENSION.unit("decades", 1, 0, "decade");
 
   /** The unit s/m of Slowness. */
-  public static final Unit<Slowness> sPerM =
-      Slowness.DIMENSION.unit("s/m", 1, 0);
+  public static final Unit<Slowness> sPerM = Slowness.DIMENSION.unit("s/m", 1, 0);
 
   /** The unit µs/ft of Slowness. */
   public static final Unit<Slowness> usPerFt =
-      Slowness.DIMENSION.unit("µs/ft", 1e-6 / 0.3048, 0, "us/ft", "μs/ft", "usec/ft", "us/f", "usft");
+      Slowness.DIMENSION.unit(
+          "µs/ft", 1e-6 / 0.3048, 0, "us/ft", "μs/ft", "usec/ft", "us/f", "usft");
 
   /** The unit µs/m of Slowness. */
   public static final Unit<Slowness> usPerM =
@@ -343,7 +330,8 @@ public final class Units {
 
   /** The unit ohm·m of Resistivity. */
   public static final Unit<Resistivity> ohmM =
-      Resistivity.DIMENSION.unit("ohm·m", 1, 0, "ohm.m", "ohmm", "ohm-m", "ohm/m", "ohms", "ohm.m²/m", "ohm.m2/m", "Ω·m");
+      Resistivity.DIMENSION.unit(
+          "ohm·m", 1, 0, "ohm.m", "ohmm", "ohm-m", "ohm/m", "ohms", "ohm.m²/m", "ohm.m2/m", "Ω·m");
 
   /** The unit gAPI of GammaRay. */
   public static final Unit<GammaRay> gAPI =
@@ -370,8 +358,7 @@ public final class Units {
       ThermalGradient.DIMENSION.unit("°C/km", 1e-3, 0, "degc/km", "k/km");
 
   /** The unit Pa/m of PressureGradient. */
-  public static final Unit<PressureGradient> PaPerM =
-      PressureGradient.DIMENSION.unit("Pa/m", 1, 0);
+  public static final Unit<PressureGradient> PaPerM = PressureGradient.DIMENSION.unit("Pa/m", 1, 0);
 
   /** The unit psi/ft of PressureGradient. */
   public static final Unit<PressureGradient> psiPerFt =

@@ -4,8 +4,7 @@ package connate.quantity;
 public final class Velocity extends Scalable<Velocity> {
 
   /** The dimension, under which the units are registered. */
-  public static final Dimension<Velocity> DIMENSION =
-      new Dimension<>("velocity", Velocity::new);
+  public static final Dimension<Velocity> DIMENSION = new Dimension<>("velocity", Velocity::new);
 
   private Velocity(double value, Unit<Velocity> unit) {
     super(value, unit);

@@ -4,8 +4,7 @@ package connate.quantity;
 public final class Viscosity extends Scalable<Viscosity> {
 
   /** The dimension, under which the units are registered. */
-  public static final Dimension<Viscosity> DIMENSION =
-      new Dimension<>("viscosity", Viscosity::new);
+  public static final Dimension<Viscosity> DIMENSION = new Dimension<>("viscosity", Viscosity::new);
 
   private Viscosity(double value, Unit<Viscosity> unit) {
     super(value, unit);

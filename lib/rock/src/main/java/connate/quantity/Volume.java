@@ -4,8 +4,7 @@ package connate.quantity;
 public final class Volume extends Scalable<Volume> {
 
   /** The dimension, under which the units are registered. */
-  public static final Dimension<Volume> DIMENSION =
-      new Dimension<>("volume", Volume::new);
+  public static final Dimension<Volume> DIMENSION = new Dimension<>("volume", Volume::new);
 
   private Volume(double value, Unit<Volume> unit) {
     super(value, unit);

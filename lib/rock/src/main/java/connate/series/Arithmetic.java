@@ -1,6 +1,5 @@
 package connate.series;
 
-import java.util.Locale;
 import connate.quantity.Fraction;
 import connate.quantity.Operand;
 import connate.quantity.Quantity;
@@ -8,6 +7,7 @@ import connate.quantity.Ratio;
 import connate.quantity.Unit;
 import connate.quantity.Units;
 import java.util.Arrays;
+import java.util.Locale;
 import java.util.function.DoubleBinaryOperator;
 import java.util.function.DoubleUnaryOperator;
 
@@ -39,7 +39,10 @@ final class Arithmetic {
       return times(other, left).named(left.name() + " × " + other.name());
     }
     throw new IllegalArgumentException(
-        "«" + left.name() + "» times a " + right.unit().dimension()
+        "«"
+            + left.name()
+            + "» times a "
+            + right.unit().dimension()
             + ": one side must be a fraction or a pure number");
   }
 
@@ -69,8 +72,13 @@ final class Arithmetic {
     if (operand instanceof Series series) {
       if (series.size() != like.size()) {
         throw new IllegalArgumentException(
-            String.format(Locale.ROOT, "«%s» has %d rows, «%s» %d: they do not stand side by side",
-                like.name(), like.size(), series.name(), series.size()));
+            String.format(
+                Locale.ROOT,
+                "«%s» has %d rows, «%s» %d: they do not stand side by side",
+                like.name(),
+                like.size(),
+                series.name(),
+                series.size()));
       }
       return series.in(unit);
     }

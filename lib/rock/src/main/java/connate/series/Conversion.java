@@ -1,11 +1,11 @@
 package connate.series;
 
-import java.util.Locale;
 import connate.method.Caution;
 import connate.method.Listening;
 import connate.quantity.Fraction;
 import connate.quantity.Ratio;
 import connate.quantity.Unit;
+import java.util.Locale;
 import java.util.Map;
 import java.util.TreeMap;
 
@@ -25,8 +25,14 @@ final class Conversion {
     }
     if (!isComparable(from, to)) {
       throw new IllegalArgumentException(
-          String.format(Locale.ROOT, "«%s» is a %s in %s; a %s was expected, in %s or the like",
-              series.name(), from.dimension(), from.symbol(), to.dimension(), to.symbol()));
+          String.format(
+              Locale.ROOT,
+              "«%s» is a %s in %s; a %s was expected, in %s or the like",
+              series.name(),
+              from.dimension(),
+              from.symbol(),
+              to.dimension(),
+              to.symbol()));
     }
     for (int row = 0; row < values.length; row++) {
       values[row] = from.convert(values[row], to);
@@ -48,25 +54,38 @@ final class Conversion {
       return fractions(series, to, values);
     }
     throw new IllegalArgumentException(
-        String.format(Locale.ROOT, "«%s» has no unit: a %s was expected. Name the unit in the header, such as %s [%s],"
+        String.format(
+            Locale.ROOT,
+            "«%s» has no unit: a %s was expected. Name the unit in the header, such as %s [%s],"
                 + " or say table.unit(\"%s\", \"%s\")",
-            series.name(), to.dimension(), series.name(), to.symbol(), series.name(), to.symbol()));
+            series.name(),
+            to.dimension(),
+            series.name(),
+            to.symbol(),
+            series.name(),
+            to.symbol()));
   }
 
   private static double[] fractions(Series series, Unit<?> to, double[] values) {
     for (double value : values) {
       if (value > 1) {
         throw new IllegalArgumentException(
-            String.format(Locale.ROOT, "«%s» has no unit and holds %s, which is no fraction: in percent? Name the unit in"
+            String.format(
+                Locale.ROOT,
+                "«%s» has no unit and holds %s, which is no fraction: in percent? Name the unit in"
                     + " the header: %s [%%]",
-                series.name(), connate.quantity.Numbers.text(value), series.name()));
+                series.name(),
+                connate.quantity.Numbers.text(value),
+                series.name()));
       }
     }
     Listening.caution(
         Caution.of(
             "U01",
             series.name(),
-            "«" + series.name() + "» has no unit; read as a fraction, because no value is above 1"));
+            "«"
+                + series.name()
+                + "» has no unit; read as a fraction, because no value is above 1"));
     for (int row = 0; row < values.length; row++) {
       values[row] = to.fromSi(values[row]);
     }

@@ -26,7 +26,13 @@ public record Estimate<Q extends Quantity<Q>>(Q value, Q low, Q high, String ran
   /** Returns value and range in the value's unit: {@code 142 mD (80 %: 96 to 211)}. */
   @Override
   public String toString() {
-    return value + " (" + range + ": " + Numbers.text(low.in(value.unit())) + " to "
-        + Numbers.text(high.in(value.unit())) + ")";
+    return value
+        + " ("
+        + range
+        + ": "
+        + Numbers.text(low.in(value.unit()))
+        + " to "
+        + Numbers.text(high.in(value.unit()))
+        + ")";
   }
 }

@@ -15,7 +15,10 @@ import java.util.function.DoubleUnaryOperator;
  */
 public interface Series extends Operand {
 
-  /** Trait: which fluid a permeability was measured with: {@code air}, {@code liquid}, {@code brine}. */
+  /**
+   * Trait: which fluid a permeability was measured with: {@code air}, {@code liquid}, {@code
+   * brine}.
+   */
   String FLUID = "fluid";
 
   /** Trait: under which stress a value stands: {@code ambient}, {@code in situ}. */
@@ -184,7 +187,9 @@ public interface Series extends Operand {
     return Arithmetic.map(this, result, function);
   }
 
-  /** Returns the decimal logarithm of each value as a pure number, missing where it is not above 0. */
+  /**
+   * Returns the decimal logarithm of each value as a pure number, missing where it is not above 0.
+   */
   default Series log10() {
     return map(connate.quantity.Units.number, v -> v > 0 ? StrictMath.log10(v) : Double.NaN)
         .named("log10 " + name());

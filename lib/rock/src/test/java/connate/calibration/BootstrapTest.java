@@ -57,7 +57,6 @@ class BootstrapTest {
   @Test
   void tooFewAreRefused() {
     assertThrows(
-        IllegalArgumentException.class,
-        () -> Bootstrap.of(new double[] {1}, v -> v[0], 1000, 1));
+        IllegalArgumentException.class, () -> Bootstrap.of(new double[] {1}, v -> v[0], 1000, 1));
   }
 }

@@ -19,8 +19,7 @@ class LinesTest {
   /** By hand: one wild point of five does not move the median slope from 2. */
   @Test
   void theilSenHoldsAgainstAWildPoint() {
-    TheilSen line =
-        TheilSen.fit(new double[] {1, 2, 3, 4, 5}, new double[] {3, 5, 7, 9, 500});
+    TheilSen line = TheilSen.fit(new double[] {1, 2, 3, 4, 5}, new double[] {3, 5, 7, 9, 500});
     assertEquals(2, line.slope(), 1e-12);
     assertEquals(1, line.intercept(), 1e-12);
   }

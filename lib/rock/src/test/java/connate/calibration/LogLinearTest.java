@@ -28,8 +28,8 @@ class LogLinearTest {
   }
 
   /**
-   * Published: Wangen (2010), p. 18, data of Bloch and others (2002): log10 k = 14.9 φ - 1.94, which
-   * is 10.9648 mD at φ = 0.2. Points on the line give the line back.
+   * Published: Wangen (2010), p. 18, data of Bloch and others (2002): log10 k = 14.9 φ - 1.94,
+   * which is 10.9648 mD at φ = 0.2. Points on the line give the line back.
    */
   @Test
   void pointsOnALineGiveTheLine() {
@@ -42,8 +42,8 @@ class LogLinearTest {
   }
 
   /**
-   * Independent: summary of lm(log10(k) ~ phi) for four points, computed by hand: φ 0.1 0.2 0.3 0.4,
-   * log10 k 0 1 1 2: slope 6, intercept -0.5, RSS 0.2, s √0.1.
+   * Independent: summary of lm(log10(k) ~ phi) for four points, computed by hand: φ 0.1 0.2 0.3
+   * 0.4, log10 k 0 1 1 2: slope 6, intercept -0.5, RSS 0.2, s √0.1.
    */
   @Test
   void scatterAndFactors() {

@@ -16,7 +16,11 @@ class LognormalMeanTest {
   /** Independent: the hypergeometric 0F1 as evaluated by another program; the limit is exp(V/2). */
   @ParameterizedTest
   @CsvSource({
-    "5, 0.5, 1.27172", "5, 1, 1.59064", "5, 2, 2.39483", "10, 1, 1.61501", "20, 2, 2.60435",
+    "5, 0.5, 1.27172",
+    "5, 1, 1.59064",
+    "5, 2, 2.39483",
+    "10, 1, 1.61501",
+    "20, 2, 2.60435",
     "1000, 1, 1.64831"
   })
   void factor(int n, double v, double expected) {
@@ -46,7 +50,9 @@ class LognormalMeanTest {
     assertEquals(StrictMath.exp(0.5), mean, 4 * sd / StrictMath.sqrt(sets));
   }
 
-  /** Published: Swanson's rule against the exact mean at σ = 1: ratio 0.948583 (Hurst et al 2000). */
+  /**
+   * Published: Swanson's rule against the exact mean at σ = 1: ratio 0.948583 (Hurst et al 2000).
+   */
   @Test
   void swansonFallsShort() {
     int n = 4001;
@@ -63,7 +69,6 @@ class LognormalMeanTest {
   @Test
   void zeroIsRefused() {
     assertThrows(
-        IllegalArgumentException.class,
-        () -> LognormalMean.sichel(Series.of("k", Units.mD, 0, 1)));
+        IllegalArgumentException.class, () -> LognormalMean.sichel(Series.of("k", Units.mD, 0, 1)));
   }
 }

@@ -10,7 +10,8 @@ class PowerLawTest {
 
   /**
    * Published: Bourbié and Zinszner (1985), J. Geophys. Res. 90, 11524: k = 0.303 φ%^3.05 mD, from
-   * which points on the law give exponent 3.05 and, for φ as a fraction, the factor 0.303 · 100^3.05.
+   * which points on the law give exponent 3.05 and, for φ as a fraction, the factor 0.303 ·
+   * 100^3.05.
    */
   @Test
   void pointsOnThePublishedLawGiveItBack() {

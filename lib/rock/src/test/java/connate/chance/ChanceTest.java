@@ -22,11 +22,11 @@ import org.junit.jupiter.api.Test;
 class ChanceTest {
 
   private static final Function<Draw, Outcome> SUM =
-      draw ->
-          Outcome.of(
-              "sum", draw.of("a", normal(0, 1)) + 2 * draw.of("b", normal(0, 1)));
+      draw -> Outcome.of("sum", draw.of("a", normal(0, 1)) + 2 * draw.of("b", normal(0, 1)));
 
-  /** Published: standard normal table, z(0.9) = 1.2816 (any handbook); lognormal P90/P50 from it. */
+  /**
+   * Published: standard normal table, z(0.9) = 1.2816 (any handbook); lognormal P90/P50 from it.
+   */
   @Test
   void quantilesOfTheLaws() {
     assertEquals(1.2816, normal(0, 1).quantile(0.9), 5e-5);
@@ -74,9 +74,7 @@ class ChanceTest {
     int n = 1000;
     Runs runs =
         simulate(
-            n,
-            seed(3).byLatinHypercube(),
-            draw -> Outcome.of("u", draw.of("u", uniform(0, 1))));
+            n, seed(3).byLatinHypercube(), draw -> Outcome.of("u", draw.of("u", uniform(0, 1))));
     double[] v = runs.get("u").values();
     Arrays.sort(v);
     for (int i = 0; i < n; i++) {
@@ -84,7 +82,9 @@ class ChanceTest {
     }
   }
 
-  /** Independent: normal scores keep the correlation that was asked for, within 4 standard errors. */
+  /**
+   * Independent: normal scores keep the correlation that was asked for, within 4 standard errors.
+   */
   @Test
   void correlationIsKept() {
     Runs runs =
@@ -97,7 +97,8 @@ class ChanceTest {
             });
     double[] a = runs.input("a").values();
     double[] b = runs.input("b").values();
-    double r = new org.apache.commons.math3.stat.correlation.PearsonsCorrelation().correlation(a, b);
+    double r =
+        new org.apache.commons.math3.stat.correlation.PearsonsCorrelation().correlation(a, b);
     assertEquals(0.6, r, 4 * (1 - 0.36) / StrictMath.sqrt(a.length));
   }
 
@@ -111,8 +112,7 @@ class ChanceTest {
   /** By hand: of 1 … 9 half exceed 5; type 7 puts the 90 % point at 1 + 0.1 · 8 = 1.8. */
   @Test
   void exceedanceSaysWhichEnd() {
-    Sample sample =
-        Sample.of(connate.series.Series.of("k", Units.mD, 9, 1, 8, 2, 7, 3, 6, 4, 5));
+    Sample sample = Sample.of(connate.series.Series.of("k", Units.mD, 9, 1, 8, 2, 7, 3, 6, 4, 5));
     assertEquals(mD(5), sample.exceededBy(50));
     assertEquals(1.8, sample.exceededBy(90).number(), 1e-12);
     assertEquals(

@@ -37,8 +37,7 @@ class FormulaTest {
           .constants(Constants.EXACT)
           .build();
 
-  private final Formula<Permeability> formula =
-      Formula.of(CARD, Units.mD, (phi, d) -> phi * d * d);
+  private final Formula<Permeability> formula = Formula.of(CARD, Units.mD, (phi, d) -> phi * d * d);
   private final List<String> cautions = new ArrayList<>();
   private final List<String> used = new ArrayList<>();
 
@@ -121,8 +120,7 @@ class FormulaTest {
 
   @Test
   void wrongDimensionIsNamed() {
-    var e =
-        assertThrows(IllegalArgumentException.class, () -> formula.value(percent(20), mD(3)));
+    var e = assertThrows(IllegalArgumentException.class, () -> formula.value(percent(20), mD(3)));
     assertTrue(e.getMessage().contains("grain diameter must be a length"), e.getMessage());
   }
 

@@ -26,7 +26,8 @@ class DykstraParsonsTest {
     NormalDistribution normal = new NormalDistribution(null, 0, 1);
     double[] k =
         IntStream.rangeClosed(1, 49)
-            .mapToDouble(i -> StrictMath.exp(4 + 1.2 * normal.inverseCumulativeProbability(i / 50.0)))
+            .mapToDouble(
+                i -> StrictMath.exp(4 + 1.2 * normal.inverseCumulativeProbability(i / 50.0)))
             .toArray();
     assertEquals(
         1 - StrictMath.exp(-1.2), DykstraParsons.of(Series.of("k", Units.mD, k)).value(), 1e-9);

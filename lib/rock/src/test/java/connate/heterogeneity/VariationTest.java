@@ -9,7 +9,9 @@ import org.junit.jupiter.api.Test;
 
 class VariationTest {
 
-  /** Published: Corbett and Jensen (1992): Cv 0.5 needs 25 samples. By hand: √(e - 1) = 1.310832. */
+  /**
+   * Published: Corbett and Jensen (1992): Cv 0.5 needs 25 samples. By hand: √(e - 1) = 1.310832.
+   */
   @Test
   void ruleAndLognormal() {
     assertEquals(25, new Variation(0.5, 30).samplesNeeded());

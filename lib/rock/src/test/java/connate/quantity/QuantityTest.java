@@ -95,8 +95,14 @@ class QuantityTest {
 
   @ParameterizedTest
   @CsvSource({
-    "142.037, 142", "0.123456, 0.1235", "0.00012345, 1.234e-4", "12110, 12110", "1234567.8, 1.235e6",
-    "0, 0", "-2.31, -2.31", "1e-15, 1e-15"
+    "142.037, 142",
+    "0.123456, 0.1235",
+    "0.00012345, 1.234e-4",
+    "12110, 12110",
+    "1234567.8, 1.235e6",
+    "0, 0",
+    "-2.31, -2.31",
+    "1e-15, 1e-15"
   })
   void numbersForPeople(double value, String text) {
     assertEquals(text, Numbers.text(value));
