@@ -98,8 +98,15 @@ public final class LeaveOut {
     int held = folds.stream().mapToInt(f -> f.length).sum();
     if (folds.size() < 2 || held < size) {
       throw new IllegalArgumentException(
-          "«" + groups.name() + "» has " + folds.size() + " groups and names " + held + " of "
-              + size + " samples: at least two groups that name every sample are needed");
+          "«"
+              + groups.name()
+              + "» has "
+              + folds.size()
+              + " groups and names "
+              + held
+              + " of "
+              + size
+              + " samples: at least two groups that name every sample are needed");
     }
     return folds;
   }

@@ -23,7 +23,8 @@ class ReferenceTest {
   @Test
   void regressionOfTheRockData() {
     List<String[]> rows = SharedData.csv(ROCK);
-    LeastSquares fit = LeastSquares.fit(List.of("area", "peri", "shape"), regressors(rows), lnK(rows));
+    LeastSquares fit =
+        LeastSquares.fit(List.of("area", "peri", "shape"), regressors(rows), lnK(rows));
     String[] terms = {"(Intercept)", "area", "peri", "shape"};
     for (int i = 0; i < terms.length; i++) {
       same("rock " + terms[i] + " coef", fit.coefficients()[i], 1e-10);
@@ -44,14 +45,14 @@ class ReferenceTest {
   @Test
   void predictionOfTheRockData() {
     List<String[]> rows = SharedData.csv(ROCK);
-    LeastSquares fit = LeastSquares.fit(List.of("area", "peri", "shape"), regressors(rows), lnK(rows));
+    LeastSquares fit =
+        LeastSquares.fit(List.of("area", "peri", "shape"), regressors(rows), lnK(rows));
     double[] at = {5000, 3000, 0.2};
     double half = fit.predictionHalfWidth(0.8, at);
     same("rock prediction fit", fit.predict(at), 1e-10);
     same("rock prediction low", fit.predict(at) - half, 1e-9);
     same("rock prediction high", fit.predict(at) + half, 1e-9);
-    double smearing =
-        Arrays.stream(fit.residuals()).map(StrictMath::exp).average().orElseThrow();
+    double smearing = Arrays.stream(fit.residuals()).map(StrictMath::exp).average().orElseThrow();
     same("rock smearing", smearing, 1e-10);
   }
 
@@ -80,8 +81,7 @@ class ReferenceTest {
 
   @Test
   void mixtureReachesTheMaximumOfAGeneralOptimiser() {
-    double[] x =
-        DoubleStream.concat(quantiles(-0.5, 0.3, 60), quantiles(0.6, 0.25, 40)).toArray();
+    double[] x = DoubleStream.concat(quantiles(-0.5, 0.3, 60), quantiles(0.6, 0.25, 40)).toArray();
     GaussianMixture mixture = GaussianMixture.of(x, 2);
     same("mixture logLik", mixture.logLikelihood(), 1e-8);
     same("mixture weight 1", mixture.weights()[0], 1e-4);

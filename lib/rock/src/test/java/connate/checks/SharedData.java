@@ -16,7 +16,8 @@ public final class SharedData {
   public static Path file(String relative) {
     Path file = folder().resolve("data").resolve(relative);
     Assumptions.assumeTrue(
-        Files.exists(file), "skipped: the open data file " + relative + " is not beside the project");
+        Files.exists(file),
+        "skipped: the open data file " + relative + " is not beside the project");
     return file;
   }
 
