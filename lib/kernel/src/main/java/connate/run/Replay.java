@@ -1,5 +1,8 @@
 package connate.run;
 
+import connate.compile.Compilation;
+import connate.compile.WholeCompiler;
+import connate.protocol.Request;
 import connate.workbook.Workbook;
 
 /** One run of a workbook from top to bottom in a fresh engine. */
@@ -7,12 +10,14 @@ public final class Replay {
 
   private final Workbook workbook;
   private final ReplaySettings settings;
-  private final ReplayWatcher watcher;
+  private final Watch watch;
+  private final Engine engine;
 
   private Replay(Workbook workbook, ReplaySettings settings, ReplayWatcher watcher) {
     this.workbook = workbook;
     this.settings = settings;
-    this.watcher = watcher;
+    this.watch = new Watch(watcher, settings.assumptions().keySet());
+    this.engine = Engine.start();
   }
 
   /** Prepares a replay and starts its engine, which boots while the caller goes on. */
@@ -28,11 +33,27 @@ public final class Replay {
 
   /** Runs the commands and returns when the last has ended, one failed, or {@link #stop} came. */
   public ReplayOutcome run() {
-    throw new UnsupportedOperationException(workbook + " " + settings + " " + watcher);
+    try (engine) {
+      engine.begin(begin(workbook, settings));
+      Compilation compilation = WholeCompiler.compile(workbook, EngineProcess.classPath());
+      new WholeRun(workbook, compilation, engine, watch).run();
+      return watch.outcome(ReplaySettings.Way.WHOLE, "");
+    }
+  }
+
+  static Request.Begin begin(Workbook workbook, ReplaySettings settings) {
+    String data = settings.data() == null ? "" : settings.data().toAbsolutePath().toString();
+    return new Request.Begin(
+        workbook.name(),
+        workbook.folder().toString(),
+        data,
+        settings.assumptions(),
+        settings.seed());
   }
 
   /** Stops the run from another thread; {@link #run} then returns with what was done so far. */
   public void stop() {
-    // lands with the engine
+    watch.stop();
+    engine.stop();
   }
 }

@@ -183,7 +183,7 @@ final class Grammar {
     }
     if (is(start, "import")) {
       kind = Command.Kind.IMPORT;
-      return expressionEnd(start + 1);
+      return lineEnd(start + 1);
     }
     if (isType(start)) {
       kind = Command.Kind.TYPE;
@@ -259,7 +259,8 @@ final class Grammar {
   private int declaredName(int from) {
     int type = is(from, "<") ? genericEnd(from) : from;
     int end = type < 0 ? -1 : typeEnd(type);
-    return end >= 0 && isName(end) && !isReserved(type) ? end : -1;
+    boolean named = end >= 0 && isName(end) && !isReserved(type);
+    return named && tokens.get(end).line() == endLine(tokens.get(end - 1)) ? end : -1;
   }
 
   private boolean isReserved(int at) {
@@ -391,6 +392,18 @@ final class Grammar {
       at = isOpening(at) ? close(at) : isClosing(at) ? STRAY : at + 1;
     }
     return at < 0 ? at : OPEN;
+  }
+
+  /** Returns the end of an import: its semicolon, or the end of its line. */
+  private int lineEnd(int from) {
+    int at = from;
+    while (at < tokens.size() && tokens.get(at).line() == tokens.get(from - 1).line()) {
+      if (is(at, ";")) {
+        return at + 1;
+      }
+      at++;
+    }
+    return at;
   }
 
   private int expressionEnd(int from) {

@@ -66,7 +66,17 @@ final class Splitting {
     int line = lineOf(start);
     int column = start - text.lastIndexOf('\n', start - 1);
     String source = text.substring(start, end);
-    commands.add(new Command(count, kind, source, start, line, line + newlines(source), column));
+    commands.add(
+        new Command(
+            count,
+            kind,
+            source,
+            start,
+            line,
+            line + newlines(source),
+            column,
+            code.get(from).start(),
+            code.get(next - 1).end()));
     count++;
     done = end;
   }

@@ -15,6 +15,14 @@ record Token(Kind kind, int start, int end, int line, String text) {
     return kind != Kind.LITERAL && text.equals(symbol);
   }
 
+  boolean isOpening() {
+    return is("(") || is("[") || is("{");
+  }
+
+  boolean isClosing() {
+    return is(")") || is("]") || is("}");
+  }
+
   boolean isWord() {
     return kind == Kind.WORD;
   }

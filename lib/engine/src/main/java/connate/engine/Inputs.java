@@ -1,0 +1,106 @@
+package connate.engine;
+
+import connate.fault.DataException;
+import connate.fault.Fault;
+import connate.protocol.Event;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.security.MessageDigest;
+import java.security.NoSuchAlgorithmException;
+import java.util.HexFormat;
+import java.util.List;
+
+/**
+ * The files that a workbook reads: found in its own folder or the data folder, read once, and told
+ * with size and digest.
+ */
+public final class Inputs {
+
+  private static final long LARGEST = 1L << 30;
+
+  private final Path folder;
+  private final Path data;
+
+  Inputs(Path folder, Path data) {
+    this.folder = folder;
+    this.data = data;
+  }
+
+  /**
+   * A file that was read.
+   *
+   * @param name the path as the workbook's folder sees it, with forward slashes
+   * @param path where the file lies
+   * @param content its bytes
+   */
+  public record Input(String name, Path path, byte[] content) {
+
+    /** Tells that the file is an input of the calculation. */
+    void told(Teller teller, int rows, List<String> mapping) {
+      teller.tell(
+          new Event.InputRead(
+              name, path.toString(), content.length, digest(content), rows, mapping));
+    }
+  }
+
+  /**
+   * Reads a file.
+   *
+   * @throws DataException if it is not there, is too large or cannot be read
+   */
+  Input read(String name) {
+    Path path = resolve(name);
+    try {
+      if (Files.size(path) > LARGEST) {
+        throw new DataException(
+            Fault.ofFile(name, "F02", "larger than 1 GiB", "cut the file, or read a part of it"));
+      }
+      return new Input(shown(path), path, Files.readAllBytes(path));
+    } catch (IOException e) {
+      throw new DataException(
+          Fault.ofFile(name, "F03", "cannot be read: " + e.getMessage(), "check its permissions"));
+    }
+  }
+
+  /** Returns where a file lies that the workbook names. */
+  Path resolve(String name) {
+    Path own = folder.resolve(name).normalize();
+    if (Files.isRegularFile(own) || data == null) {
+      return existing(own, name);
+    }
+    Path other = data.resolve(name).normalize();
+    return existing(Files.isRegularFile(other) ? other : own, name);
+  }
+
+  /** Returns the path as the workbook's folder sees it, with forward slashes. */
+  String shown(Path path) {
+    Path base = path.startsWith(folder) || data == null || !path.startsWith(data) ? folder : data;
+    Path relative = path.startsWith(base) ? base.relativize(path) : path.getFileName();
+    return relative.toString().replace('\\', '/');
+  }
+
+  private Path existing(Path path, String name) {
+    if (Files.isDirectory(path)) {
+      throw new DataException(
+          Fault.ofFile(name, "F01", "is a folder, where a file is expected", "name a file in it"));
+    }
+    if (!Files.isRegularFile(path)) {
+      throw new DataException(
+          Fault.ofFile(name, "F01", "no such file" + places(), Nearest.file(path)));
+    }
+    return path;
+  }
+
+  private String places() {
+    return data == null ? " beside the workbook" : " beside the workbook or in the data folder";
+  }
+
+  private static String digest(byte[] content) {
+    try {
+      return HexFormat.of().formatHex(MessageDigest.getInstance("SHA-256").digest(content));
+    } catch (NoSuchAlgorithmException e) {
+      throw new IllegalStateException("every JDK has SHA-256", e);
+    }
+  }
+}

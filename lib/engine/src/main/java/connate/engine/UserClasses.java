@@ -1,0 +1,47 @@
+package connate.engine;
+
+import connate.protocol.Request;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
+
+/** The classes of the user's commands, apart from the library's. */
+final class UserClasses extends ClassLoader {
+
+  private final Map<String, byte[]> waiting = new ConcurrentHashMap<>();
+
+  UserClasses() {
+    super("workbook", UserClasses.class.getClassLoader());
+  }
+
+  /** Takes classes, which are woven and defined when they are first needed. */
+  void add(List<Request.Bytecode> classes) {
+    classes.forEach(c -> waiting.put(c.name(), c.bytes()));
+  }
+
+  @Override
+  protected Class<?> findClass(String name) throws ClassNotFoundException {
+    byte[] bytes = waiting.remove(name);
+    if (bytes == null) {
+      throw new ClassNotFoundException(name);
+    }
+    byte[] woven = Weaver.weave(bytes);
+    return defineClass(name, woven, 0, woven.length);
+  }
+
+  /** Returns whether a class of that name is one of the user's. */
+  boolean isUsers(String name) {
+    return findLoadedClass(name) != null || waiting.containsKey(name);
+  }
+
+  /** Returns the user's class of a stack frame, where it is one. */
+  Optional<String> shortName(String name) {
+    if (!isUsers(name)) {
+      return Optional.empty();
+    }
+    int dot = name.lastIndexOf('.');
+    int nested = name.indexOf('$', name.startsWith("$", dot + 1) ? dot + 2 : dot + 1);
+    return Optional.of(nested < 0 ? "" : name.substring(nested + 1).replace('$', '.'));
+  }
+}

@@ -1,0 +1,79 @@
+package connate.compile;
+
+import connate.fault.Fault;
+import connate.workbook.Command;
+import connate.workbook.Workbook;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
+import javax.tools.Diagnostic;
+
+/** Says in plain words what the compiler found, at the workbook's own line and column. */
+final class Complaint {
+
+  private static final Pattern SYMBOL = Pattern.compile("symbol:\\s+(\\S+) (.+)");
+  private static final Pattern WHERE = Pattern.compile("location:\\s+(.+)");
+  private static final Map<String, String> PLAIN =
+      Map.of(
+          "compiler.err.premature.eof", "the command is not finished: a bracket stays open",
+          "compiler.err.unclosed.str.lit", "a text begins here that no \" closes",
+          "compiler.err.unclosed.comment", "a comment begins here that no */ closes",
+          "compiler.err.illegal.start.of.expr", "no expression can begin like this",
+          "compiler.err.not.stmt", "this does nothing: neither a call nor an assignment");
+
+  private final Workbook workbook;
+
+  Complaint(Workbook workbook) {
+    this.workbook = workbook;
+  }
+
+  /** Returns the problem that a diagnostic tells. */
+  Problem of(Diagnostic<?> diagnostic, int offset, int length, Command command) {
+    String text = diagnostic.getMessage(Locale.ENGLISH).replace(Header.OWNER + ".", "");
+    String plain = PLAIN.get(diagnostic.getCode());
+    String message = plain == null ? words(diagnostic.getCode(), text) : plain;
+    return of(offset, length, command, message, help(diagnostic.getCode(), text, command));
+  }
+
+  /** Returns a problem at a place. */
+  Problem of(int offset, int length, Command command, String message, String help) {
+    int place = Math.min(offset, workbook.text().length());
+    int line = workbook.lineAt(place);
+    int column = workbook.columnAt(place);
+    String shown = workbook.lines().get(line - 1);
+    int marks = Math.max(1, Math.min(length, shown.length() - column + 1));
+    Fault fault =
+        new Fault(workbook.name(), line, column, marks, "J01", message, shown, help);
+    return new Problem(command.index(), line, column, fault.toString());
+  }
+
+  private static String words(String code, String text) {
+    Matcher symbol = SYMBOL.matcher(text);
+    if (code.startsWith("compiler.err.cant.resolve") && symbol.find()) {
+      String kind = symbol.group(1).equals("class") ? "type" : symbol.group(1);
+      Matcher where = WHERE.matcher(text);
+      boolean own = !where.find() || where.group(1).contains(Header.OWNER);
+      String owner = own ? "" : " in " + where.group(1).replaceFirst("^(class|interface) ", "");
+      return "no " + kind + " «" + symbol.group(2).strip() + "» is known" + (own ? " here" : owner);
+    }
+    return text.lines().map(String::strip).filter(l -> !l.isEmpty())
+        .reduce((a, b) -> a + "; " + b).orElse("does not compile");
+  }
+
+  private String help(String code, String text, Command command) {
+    Matcher symbol = SYMBOL.matcher(text);
+    if (!code.startsWith("compiler.err.cant.resolve") || !symbol.find()) {
+      return "";
+    }
+    List<String> names =
+        workbook.commands().stream()
+            .filter(c -> c.index() < command.index() && c.kind() == Command.Kind.VARIABLE)
+            .flatMap(c -> c.declaredNames().stream())
+            .toList();
+    return Nearby.name(symbol.group(2).strip(), names)
+        .map(n -> "did you mean «" + n + "»?")
+        .orElse("");
+  }
+}
