@@ -22,8 +22,7 @@ final class Measures {
       return Optional.of(ranged(e.value(), e.low(), e.high(), e.range(), 0, e.toString()));
     }
     if (value instanceof Exceedance e) {
-      return Optional.of(
-          ranged(e.middle(), e.low(), e.high(), e.words(), e.runs(), e.toString()));
+      return Optional.of(ranged(e.middle(), e.low(), e.high(), e.words(), e.runs(), e.toString()));
     }
     if (value instanceof Number number) {
       return Optional.of(number(number));

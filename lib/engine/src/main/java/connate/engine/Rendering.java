@@ -25,9 +25,10 @@ public final class Rendering {
 
   /** Returns a value as an item. */
   public static Item of(Object value) {
-    Optional<Item.Measure> measure = value instanceof Operand || value instanceof Number
-        ? Measures.find(value)
-        : Optional.empty();
+    Optional<Item.Measure> measure =
+        value instanceof Operand || value instanceof Number
+            ? Measures.find(value)
+            : Optional.empty();
     if (measure.isPresent()) {
       return measure.get();
     }
@@ -99,12 +100,19 @@ public final class Rendering {
     }
     int missing = series.size() - series.count();
     String range = series.count() == 0 ? "" : ", " + series.min() + " to " + series.max();
-    return series.name() + unit + numbers + "\n" + series.size() + " values"
-        + (missing == 0 ? "" : ", " + missing + " missing") + range;
+    return series.name()
+        + unit
+        + numbers
+        + "\n"
+        + series.size()
+        + " values"
+        + (missing == 0 ? "" : ", " + missing + " missing")
+        + range;
   }
 
   private static String elements(Collection<?> values, int size, int depth) {
-    StringJoiner out = new StringJoiner(", ", "[", size > MOST_ELEMENTS ? ", … " + size + "]" : "]");
+    StringJoiner out =
+        new StringJoiner(", ", "[", size > MOST_ELEMENTS ? ", … " + size + "]" : "]");
     int told = 0;
     for (Object value : values) {
       if (told < MOST_ELEMENTS) {

@@ -22,8 +22,7 @@ final class CodePass {
   private final Map<String, TypeName> types = new HashMap<>();
   private String clash = "";
 
-  CodePass(
-      Workbook workbook, List<Command> commands, Map<Integer, List<Variable>> variables) {
+  CodePass(Workbook workbook, List<Command> commands, Map<Integer, List<Variable>> variables) {
     this.commands = commands;
     this.variables = variables;
     this.sheet = new Sheet(workbook);
@@ -109,8 +108,11 @@ final class CodePass {
       declared.put(variable.name(), command.index());
       sheet.add("static " + type(variable) + " " + variable.name() + "; ");
     } else if (!before.equals(variable.type()) || !before.exact()) {
-      clash = "«" + variable.name() + "» is declared twice with different types, again in line "
-          + (command.firstLine());
+      clash =
+          "«"
+              + variable.name()
+              + "» is declared twice with different types, again in line "
+              + (command.firstLine());
     }
     if (!variable.type().isWritten() && !variable.broken()) {
       clash = "the type of «" + variable.name() + "» has no name";

@@ -13,7 +13,11 @@ import java.util.List;
  * @param why why the workbook must be compiled command by command, empty where it need not
  */
 public record Compilation(
-    String owner, List<Request.Bytecode> classes, List<Entry> entries, Problem problem, String why) {
+    String owner,
+    List<Request.Bytecode> classes,
+    List<Entry> entries,
+    Problem problem,
+    String why) {
 
   static Compilation commandByCommand(String why) {
     return new Compilation("", List.of(), List.of(), null, why);

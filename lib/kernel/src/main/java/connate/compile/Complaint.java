@@ -44,8 +44,7 @@ final class Complaint {
     int column = workbook.columnAt(place);
     String shown = workbook.lines().get(line - 1);
     int marks = Math.max(1, Math.min(length, shown.length() - column + 1));
-    Fault fault =
-        new Fault(workbook.name(), line, column, marks, "J01", message, shown, help);
+    Fault fault = new Fault(workbook.name(), line, column, marks, "J01", message, shown, help);
     return new Problem(command.index(), line, column, fault.toString());
   }
 
@@ -58,8 +57,11 @@ final class Complaint {
       String owner = own ? "" : " in " + where.group(1).replaceFirst("^(class|interface) ", "");
       return "no " + kind + " «" + symbol.group(2).strip() + "» is known" + (own ? " here" : owner);
     }
-    return text.lines().map(String::strip).filter(l -> !l.isEmpty())
-        .reduce((a, b) -> a + "; " + b).orElse("does not compile");
+    return text.lines()
+        .map(String::strip)
+        .filter(l -> !l.isEmpty())
+        .reduce((a, b) -> a + "; " + b)
+        .orElse("does not compile");
   }
 
   private String help(String code, String text, Command command) {

@@ -30,8 +30,14 @@ final class Javac {
     files = compiler.getStandardFileManager(null, Locale.ENGLISH, StandardCharsets.UTF_8);
     options =
         List.of(
-            "-cp", classPath, "-proc:none", "-implicit:none", "-nowarn", "-Xlint:none",
-            "-XDshould-stop.ifError=FLOW", "-XDstringConcat=inline");
+            "-cp",
+            classPath,
+            "-proc:none",
+            "-implicit:none",
+            "-nowarn",
+            "-Xlint:none",
+            "-XDshould-stop.ifError=FLOW",
+            "-XDstringConcat=inline");
   }
 
   /** Parses and attributes a source file. */

@@ -47,7 +47,8 @@ final class Memory extends ForwardingJavaFileManager<JavaFileManager> {
 
   /** Returns a source file. */
   static JavaFileObject source(String text) {
-    return new SimpleJavaFileObject(URI.create("memory:///workbook.jsh"), JavaFileObject.Kind.SOURCE) {
+    return new SimpleJavaFileObject(
+        URI.create("memory:///workbook.jsh"), JavaFileObject.Kind.SOURCE) {
       @Override
       public CharSequence getCharContent(boolean ignoreErrors) {
         return text;

@@ -18,7 +18,8 @@ import java.util.Set;
 import javax.lang.model.element.Element;
 
 /**
- * What each member of the compiled workbook refers to: variables, methods and types of the workbook.
+ * What each member of the compiled workbook refers to: variables, methods and types of the
+ * workbook.
  */
 final class References {
 

@@ -5,8 +5,8 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * A source file made of parts of a workbook and of words between them. It knows for each place where
- * that stands in the workbook, and keeps the parts on their lines when asked to.
+ * A source file made of parts of a workbook and of words between them. It knows for each place
+ * where that stands in the workbook, and keeps the parts on their lines when asked to.
  */
 final class Sheet {
 

@@ -71,7 +71,8 @@ record TypeName(String text, boolean exact) {
 
   private static String owner(DeclaredType type, TypeElement element, int depth) {
     if (type.getEnclosingType().getKind() == TypeKind.DECLARED) {
-      return declared((DeclaredType) type.getEnclosingType(), depth).text + "."
+      return declared((DeclaredType) type.getEnclosingType(), depth).text
+          + "."
           + element.getSimpleName();
     }
     return element.getQualifiedName().toString();
@@ -88,8 +89,7 @@ record TypeName(String text, boolean exact) {
     if (!name.isWritten()) {
       return new TypeName("?", false);
     }
-    boolean bound =
-        type.getKind() == TypeKind.INTERSECTION || type.getKind() == TypeKind.TYPEVAR;
+    boolean bound = type.getKind() == TypeKind.INTERSECTION || type.getKind() == TypeKind.TYPEVAR;
     boolean wider = bound || !name.exact;
     return wider ? new TypeName("? extends " + name.text, false) : name;
   }

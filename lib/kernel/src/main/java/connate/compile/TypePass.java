@@ -143,7 +143,8 @@ final class TypePass {
             .computeIfAbsent(command.index(), i -> new ArrayList<>())
             .add(variable(path, variable, command));
       }
-    } else if (statement instanceof ClassTree type && type.getSimpleName().toString().startsWith(AGAIN)) {
+    } else if (statement instanceof ClassTree type
+        && type.getSimpleName().toString().startsWith(AGAIN)) {
       collect(path);
     }
   }

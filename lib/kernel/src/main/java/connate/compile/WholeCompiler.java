@@ -13,8 +13,8 @@ import javax.lang.model.element.ElementKind;
 import javax.tools.Diagnostic;
 
 /**
- * Compiles a workbook at once. Where a command does not compile, those before it are compiled all the
- * same; where the workbook does not fit this form, the answer says why.
+ * Compiles a workbook at once. Where a command does not compile, those before it are compiled all
+ * the same; where the workbook does not fit this form, the answer says why.
  */
 public final class WholeCompiler {
 

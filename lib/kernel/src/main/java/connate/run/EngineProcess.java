@@ -49,9 +49,16 @@ final class EngineProcess {
     command.add(Path.of(System.getProperty("java.home"), "bin", "java").toString());
     command.addAll(
         List.of(
-            "-XX:+UseSerialGC", "-XX:-UsePerfData", "-XX:+DisplayVMOutputToStderr", "-Xshare:auto",
-            "-Xlog:disable", "-Djava.awt.headless=true", "-Dfile.encoding=UTF-8",
-            "-Duser.language=en", "-Duser.country=", "-Duser.timezone=UTC"));
+            "-XX:+UseSerialGC",
+            "-XX:-UsePerfData",
+            "-XX:+DisplayVMOutputToStderr",
+            "-Xshare:auto",
+            "-Xlog:disable",
+            "-Djava.awt.headless=true",
+            "-Dfile.encoding=UTF-8",
+            "-Duser.language=en",
+            "-Duser.country=",
+            "-Duser.timezone=UTC"));
     archive(command);
     String more = System.getProperty("connate.engine.options", "");
     if (!more.isBlank()) {
