@@ -1,0 +1,7 @@
+package connate.check.wrong.one;
+
+/** Breaks two rules on purpose: another package has this name too, and so has Java. */
+public final class Scanner {
+
+  private Scanner() {}
+}
