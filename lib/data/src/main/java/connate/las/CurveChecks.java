@@ -5,6 +5,7 @@ import java.util.HashMap;
 import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
 
@@ -61,9 +62,13 @@ final class CurveChecks {
         quirks.caution(
             "L36",
             curve.header().line(),
-            "%s is listed again (first on line %d): named %s; %s"
-                .formatted(
-                    curve.mnemonic(), other.header().line(), curve.name(), compared(other, curve)));
+            String.format(
+                Locale.ROOT,
+                "%s is listed again (first on line %d): named %s; %s",
+                curve.mnemonic(),
+                other.header().line(),
+                curve.name(),
+                compared(other, curve)));
       }
     }
   }
@@ -112,7 +117,8 @@ final class CurveChecks {
     }
     if (nullValue >= min && nullValue <= max && curve.missing() > 0) {
       firstSpanning = spanning.isEmpty() ? curve.header().line() : firstSpanning;
-      spanning.add("%s (%s to %s)".formatted(curve.name(), plain(min), plain(max)));
+      spanning.add(
+          String.format(Locale.ROOT, "%s (%s to %s)", curve.name(), plain(min), plain(max)));
     }
   }
 
@@ -136,15 +142,21 @@ final class CurveChecks {
             quirks.caution(
                 "L39",
                 firstMark,
-                "%s stands at the end of the values of %s: a mark for no value or out of scale? "
-                        .formatted(plain(mark), some(names))
+                String.format(
+                        Locale.ROOT,
+                        "%s stands at the end of the values of %s: a mark for no value or out of scale? ",
+                        plain(mark),
+                        some(names))
                     + "kept as values"));
     if (!spanning.isEmpty()) {
       quirks.caution(
           "L40",
           firstSpanning,
-          "the null value %s lies among the values of %s: read as missing all the same"
-              .formatted(plain(nullValue), some(spanning)));
+          String.format(
+              Locale.ROOT,
+              "the null value %s lies among the values of %s: read as missing all the same",
+              plain(nullValue),
+              some(spanning)));
     }
   }
 

@@ -58,7 +58,8 @@ final class HeadChecks {
           throw text.refusal(
               item,
               "L15",
-              "%s is '%s', where a number was expected".formatted(mnemonic, item.value()),
+              String.format(
+                  Locale.ROOT, "%s is '%s', where a number was expected", mnemonic, item.value()),
               "correct the line, or leave the value blank");
         }
         quirks.caution("L51", item.line(), mnemonic + " has no value");
@@ -86,8 +87,10 @@ final class HeadChecks {
       quirks.caution(
           "L40",
           item.line(),
-          "the null value %s is a value that a log can have"
-              .formatted(IndexFinder.plain(HeaderNumber.of(item))));
+          String.format(
+              Locale.ROOT,
+              "the null value %s is a value that a log can have",
+              IndexFinder.plain(HeaderNumber.of(item))));
     }
   }
 
@@ -113,13 +116,16 @@ final class HeadChecks {
             quirks.note(
                 "L55",
                 section.line(),
-                "%s is a section that the standard does not know: kept as text"
-                    .formatted(section.title().strip()));
+                String.format(
+                    Locale.ROOT,
+                    "%s is a section that the standard does not know: kept as text",
+                    section.title().strip()));
         case SET_DATA ->
             quirks.note(
                 "L55",
                 section.line(),
-                "%s is a data set beside the log".formatted(section.title().strip()));
+                String.format(
+                    Locale.ROOT, "%s is a data set beside the log", section.title().strip()));
         default -> {}
       }
     }
@@ -138,11 +144,12 @@ final class HeadChecks {
           quirks.caution(
               "L37",
               item.line(),
-              "%s stands twice, first on line %d, with %s: the "
-                      .formatted(
-                          item.mnemonic(),
-                          other.line(),
-                          isSame ? "the same value" : "another value")
+              String.format(
+                      Locale.ROOT,
+                      "%s stands twice, first on line %d, with %s: the ",
+                      item.mnemonic(),
+                      other.line(),
+                      isSame ? "the same value" : "another value")
                   + "first is taken");
         }
       }

@@ -121,7 +121,8 @@ final class HeaderReader {
   }
 
   private static String described(HeaderLine item) {
-    return "'%s' as the name, '%s' as the value".formatted(item.mnemonic(), item.value());
+    return String.format(
+        Locale.ROOT, "'%s' as the name, '%s' as the value", item.mnemonic(), item.value());
   }
 
   /** Tells of blank lines and foreign characters, once for the file. */
@@ -169,7 +170,7 @@ final class HeaderReader {
     throw text.refusal(
         item,
         "L06",
-        "VERS is '%s', where 1.2, 2.0 or 3.0 was expected".formatted(stated),
+        String.format(Locale.ROOT, "VERS is '%s', where 1.2, 2.0 or 3.0 was expected", stated),
         "correct the VERS line");
   }
 

@@ -1,5 +1,7 @@
 package connate.las;
 
+import java.util.Locale;
+
 /** Compares the index with what the well section says of it, and looks along it. */
 final class IndexChecks {
 
@@ -83,8 +85,12 @@ final class IndexChecks {
       quirks.caution(
           "L49",
           header.line(),
-          "STRT is in %s, the curve %s in %s: the curve's unit is taken"
-              .formatted(well.startUnit(), header.mnemonic(), header.unit()));
+          String.format(
+              Locale.ROOT,
+              "STRT is in %s, the curve %s in %s: the curve's unit is taken",
+              well.startUnit(),
+              header.mnemonic(),
+              header.unit()));
     }
   }
 
@@ -99,14 +105,19 @@ final class IndexChecks {
       quirks.caution(
           "L31",
           well.line(0),
-          "STRT is %s, but the data run the other way, from %s to %s: kept as they stand"
-              .formatted(plain(well.start()), plain(first), plain(last)));
+          String.format(
+              Locale.ROOT,
+              "STRT is %s, but the data run the other way, from %s to %s: kept as they stand",
+              plain(well.start()),
+              plain(first),
+              plain(last)));
     }
     double end = isReversed ? first : last;
     if (end != stop && !Double.isNaN(stop)) {
       boolean isNoise = Math.abs(end - stop) <= NOISE * Math.max(Math.abs(well.step()), 1e-3);
       String message =
-          "STOP is %s, but the data end at %s".formatted(plain(well.stop()), plain(end));
+          String.format(
+              Locale.ROOT, "STOP is %s, but the data end at %s", plain(well.stop()), plain(end));
       if (isNoise) {
         quirks.note("L33", well.line(1), message);
       } else {
@@ -164,14 +175,17 @@ final class IndexChecks {
       quirks.caution(
           "L34",
           text.lineOf(columns.offset(repeated)),
-          "the index %s comes twice".formatted(plain(at(repeated))));
+          String.format(Locale.ROOT, "the index %s comes twice", plain(at(repeated))));
     }
     if (turned > 0) {
       quirks.caution(
           "L35",
           text.lineOf(columns.offset(turned)),
-          "the index turns back, from %s to %s"
-              .formatted(plain(at(turned - 1)), plain(at(turned))));
+          String.format(
+              Locale.ROOT,
+              "the index turns back, from %s to %s",
+              plain(at(turned - 1)),
+              plain(at(turned))));
     }
   }
 
@@ -189,9 +203,13 @@ final class IndexChecks {
       quirks.caution(
           "L32",
           text.lineOf(columns.offset(uneven)),
-          "the step is uneven here: from %s to %s, where STEP is %s; widest step %s"
-              .formatted(
-                  plain(at(uneven - 1)), plain(at(uneven)), plain(well.step()), plain(widest)));
+          String.format(
+              Locale.ROOT,
+              "the step is uneven here: from %s to %s, where STEP is %s; widest step %s",
+              plain(at(uneven - 1)),
+              plain(at(uneven)),
+              plain(well.step()),
+              plain(widest)));
     }
     if (isStatedIrregular) {
       return;
@@ -200,14 +218,18 @@ final class IndexChecks {
       quirks.caution(
           "L31",
           well.line(2),
-          "STEP is %s, but the index runs the other way: by %s"
-              .formatted(plain(well.step()), plain(step)));
+          String.format(
+              Locale.ROOT,
+              "STEP is %s, but the index runs the other way: by %s",
+              plain(well.step()),
+              plain(step)));
     }
     if (Math.abs(Math.abs(stated) - Math.abs(step)) > 0.01 * Math.abs(stated)) {
       quirks.caution(
           "L32",
           well.line(2),
-          "STEP is %s, but the data step by %s".formatted(plain(well.step()), plain(step)));
+          String.format(
+              Locale.ROOT, "STEP is %s, but the data step by %s", plain(well.step()), plain(step)));
     }
   }
 

@@ -3,6 +3,7 @@ package connate.las;
 import connate.quantity.Numbers;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Set;
 
 /**
@@ -99,8 +100,11 @@ final class IndexFinder {
         "L30",
         curves.get(curve).line(),
         "the curve section lists the columns in another order than the labels of the data: "
-            + "ordered by the labels, where %s is column %d and starts at STRT"
-                .formatted(curves.get(curve).mnemonic(), labelled[curve] + 1));
+            + String.format(
+                Locale.ROOT,
+                "ordered by the labels, where %s is column %d and starts at STRT",
+                curves.get(curve).mnemonic(),
+                labelled[curve] + 1));
     return new Found(curve, labelled);
   }
 
@@ -122,15 +126,19 @@ final class IndexFinder {
       quirks.caution(
           "L30",
           curves.get(named).line(),
-          "the index %s is not the first curve: found in column %d, which starts at STRT"
-              .formatted(curves.get(named).mnemonic(), named + 1));
+          String.format(
+              Locale.ROOT,
+              "the index %s is not the first curve: found in column %d, which starts at STRT",
+              curves.get(named).mnemonic(),
+              named + 1));
       return new Found(named, order);
     }
     if (first && labelled != null) {
       return new Found(0, order);
     }
     if (first) {
-      throw contradiction(named, "column 1, listed as %s,".formatted(curves.get(0).mnemonic()));
+      throw contradiction(
+          named, String.format(Locale.ROOT, "column 1, listed as %s,", curves.get(0).mnemonic()));
     }
     throw noStart(named);
   }
@@ -140,13 +148,14 @@ final class IndexFinder {
     return text.refusal(
         line,
         "L10",
-        "%s is listed as curve %d, but %s: STRT is %s, and that column starts at %s"
-            .formatted(
-                line.mnemonic(),
-                curve + 1,
-                other,
-                plain(well.start()),
-                plain(first(other.startsWith("column 1,") ? 0 : labelled[curve]))),
+        String.format(
+            Locale.ROOT,
+            "%s is listed as curve %d, but %s: STRT is %s, and that column starts at %s",
+            line.mnemonic(),
+            curve + 1,
+            other,
+            plain(well.start()),
+            plain(first(other.startsWith("column 1,") ? 0 : labelled[curve]))),
         "put the curve lines into the order of the columns, or name the index: "
             + "LasOptions.STRICT.withIndex(\""
             + line.mnemonic()
@@ -163,8 +172,13 @@ final class IndexFinder {
     String where = others.isEmpty() ? "no column starts there" : others + " would";
     String name = curves.get(curve).mnemonic();
     String message =
-        "STRT is %s, but %s starts at %s; %s"
-            .formatted(plain(well.start()), name, plain(first(curve)), where);
+        String.format(
+            Locale.ROOT,
+            "STRT is %s, but %s starts at %s; %s",
+            plain(well.start()),
+            name,
+            plain(first(curve)),
+            where);
     String help = "correct STRT, or name the index: LasOptions.STRICT.withIndex(\"" + name + "\")";
     int at = text.from;
     while (text.lineOf(at) < well.line(0) && at < text.to) {

@@ -3,6 +3,7 @@ package connate.las;
 import connate.las.LasSection.Kind;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 
 /** Reads a file from its bytes, section by section. */
 final class LasReader {
@@ -45,7 +46,8 @@ final class LasReader {
       throw text.refusal(
           lines.get(found.curve()),
           "L17",
-          "the index %s holds text".formatted(lines.get(found.curve()).mnemonic()),
+          String.format(
+              Locale.ROOT, "the index %s holds text", lines.get(found.curve()).mnemonic()),
           "give the index as a number: depth, or seconds from a start");
     }
     new IndexChecks(text, well, lines.get(found.curve()), columns, column, quirks).run();

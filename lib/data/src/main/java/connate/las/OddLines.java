@@ -4,6 +4,7 @@ import connate.fault.DataException;
 import connate.fault.Fault;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 
 /** Takes the lines of data that are no plain row of numbers, and judges them at the end. */
 final class OddLines {
@@ -136,7 +137,7 @@ final class OddLines {
                 at,
                 text.offset(from, line, place[1]),
                 isComma ? "L14" : "L08",
-                message.formatted(item, column + 1),
+                String.format(Locale.ROOT, message, item, column + 1),
                 help)));
   }
 
@@ -152,7 +153,11 @@ final class OddLines {
                 at,
                 text.offset(from, line, place[1]),
                 "L07",
-                "row of %d values, where ~C lists %d curves".formatted(places.size(), columns),
+                String.format(
+                    Locale.ROOT,
+                    "row of %d values, where ~C lists %d curves",
+                    places.size(),
+                    columns),
                 "correct the row, or set such rows aside with LasOptions.STRICT.settingRowsAside()")));
   }
 
@@ -244,8 +249,11 @@ final class OddLines {
     quirks.caution(
         "L43",
         last.fault.line(),
-        "the data end in a fragment of %d values, where %d were expected: left out"
-            .formatted(last.items, columns.count()));
+        String.format(
+            Locale.ROOT,
+            "the data end in a fragment of %d values, where %d were expected: left out",
+            last.items,
+            columns.count()));
     misfits.remove(last);
     misfitCount--;
   }

@@ -42,7 +42,8 @@ final class SetReader {
       quirks.caution(
           "L55",
           data.line(),
-          "%s has no definition %s: left out".formatted(data.title().strip(), definition));
+          String.format(
+              Locale.ROOT, "%s has no definition %s: left out", data.title().strip(), definition));
       return;
     }
     LasSection parameters = named(sections, word.replaceFirst("(?i)_DATA", "_PARAMETER"));
@@ -87,7 +88,11 @@ final class SetReader {
         quirks.caution(
             "L55",
             line,
-            "row of %d items, where %d are defined: left out".formatted(items.size(), columns));
+            String.format(
+                Locale.ROOT,
+                "row of %d items, where %d are defined: left out",
+                items.size(),
+                columns));
         continue;
       }
       items.replaceAll(i -> NumberScan.plain(i) == nullValue ? "" : i.strip());

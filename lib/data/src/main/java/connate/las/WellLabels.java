@@ -47,7 +47,10 @@ final class WellLabels {
         quirks.caution(
             "L50",
             item.line(),
-            "%s has its value after the colon, as in version 1.2: ".formatted(item.mnemonic())
+            String.format(
+                    Locale.ROOT,
+                    "%s has its value after the colon, as in version 1.2: ",
+                    item.mnemonic())
                 + "read '"
                 + behind
                 + "'");
@@ -62,7 +65,10 @@ final class WellLabels {
         quirks.caution(
             "L50",
             item.line(),
-            "%s has its value before the colon, as in version 2.0: ".formatted(item.mnemonic())
+            String.format(
+                    Locale.ROOT,
+                    "%s has its value before the colon, as in version 2.0: ",
+                    item.mnemonic())
                 + "read '"
                 + before
                 + "'");

@@ -4,6 +4,7 @@ import connate.fault.DataException;
 import connate.fault.Fault;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 
 /**
  * Reads wrapped data: the index alone on a line, then the other values over several lines. A row
@@ -67,8 +68,11 @@ final class WrappedScan {
             lineFrom,
             at,
             "L12",
-            "the row that starts at line %d runs over: more than %d values"
-                .formatted(text.lineOf(rowFrom), columns.count()));
+            String.format(
+                Locale.ROOT,
+                "the row that starts at line %d runs over: more than %d values",
+                text.lineOf(rowFrom),
+                columns.count()));
         return;
       }
       int end = item(at);
@@ -93,8 +97,11 @@ final class WrappedScan {
           lineFrom,
           lineFrom,
           "L12",
-          "a row starts with %d values on its first line, where the first row starts with %d: "
-                  .formatted(items, firstShape.get(0))
+          String.format(
+                  Locale.ROOT,
+                  "a row starts with %d values on its first line, where the first row starts with %d: ",
+                  items,
+                  firstShape.get(0))
               + "a value of the row above is missing");
       return;
     }
@@ -118,7 +125,8 @@ final class WrappedScan {
             rowFrom,
             at,
             "L08",
-            "'%s' in curve %d is not a number".formatted(text.text(at, end), filled + 1));
+            String.format(
+                Locale.ROOT, "'%s' in curve %d is not a number", text.text(at, end), filled + 1));
         return -1;
       }
       tally.item(loose.kind(), at);
@@ -153,8 +161,11 @@ final class WrappedScan {
       quirks.caution(
           "L43",
           text.lineOf(rowFrom),
-          "the data end in a fragment of %d values, where %d were expected: left out"
-              .formatted(filled, columns.count()));
+          String.format(
+              Locale.ROOT,
+              "the data end in a fragment of %d values, where %d were expected: left out",
+              filled,
+              columns.count()));
     }
     tally.tell();
     if (numbers.exponents) {
