@@ -62,9 +62,8 @@ final class CurveChecks {
         quirks.caution(
             "L36",
             curve.header().line(),
-            String.format(
-                Locale.ROOT,
-                "%s is listed again (first on line %d): named %s; %s",
+            Words.fill(
+                "{} is listed again (first on line {}): named {}; {}",
                 curve.mnemonic(),
                 other.header().line(),
                 curve.name(),
@@ -117,8 +116,7 @@ final class CurveChecks {
     }
     if (nullValue >= min && nullValue <= max && curve.missing() > 0) {
       firstSpanning = spanning.isEmpty() ? curve.header().line() : firstSpanning;
-      spanning.add(
-          String.format(Locale.ROOT, "%s (%s to %s)", curve.name(), plain(min), plain(max)));
+      spanning.add(Words.fill("{} ({} to {})", curve.name(), plain(min), plain(max)));
     }
   }
 
@@ -142,9 +140,8 @@ final class CurveChecks {
             quirks.caution(
                 "L39",
                 firstMark,
-                String.format(
-                        Locale.ROOT,
-                        "%s stands at the end of the values of %s: a mark for no value or out of scale? ",
+                Words.fill(
+                        "{} stands at the end of the values of {}: a mark for no value or out of scale? ",
                         plain(mark),
                         some(names))
                     + "kept as values"));
@@ -152,9 +149,8 @@ final class CurveChecks {
       quirks.caution(
           "L40",
           firstSpanning,
-          String.format(
-              Locale.ROOT,
-              "the null value %s lies among the values of %s: read as missing all the same",
+          Words.fill(
+              "the null value {} lies among the values of {}: read as missing all the same",
               plain(nullValue),
               some(spanning)));
     }

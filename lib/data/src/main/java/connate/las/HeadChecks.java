@@ -58,8 +58,7 @@ final class HeadChecks {
           throw text.refusal(
               item,
               "L15",
-              String.format(
-                  Locale.ROOT, "%s is '%s', where a number was expected", mnemonic, item.value()),
+              Words.fill("{} is '{}', where a number was expected", mnemonic, item.value()),
               "correct the line, or leave the value blank");
         }
         quirks.caution("L51", item.line(), mnemonic + " has no value");
@@ -87,9 +86,8 @@ final class HeadChecks {
       quirks.caution(
           "L40",
           item.line(),
-          String.format(
-              Locale.ROOT,
-              "the null value %s is a value that a log can have",
+          Words.fill(
+              "the null value {} is a value that a log can have",
               IndexFinder.plain(HeaderNumber.of(item))));
     }
   }
@@ -116,16 +114,14 @@ final class HeadChecks {
             quirks.note(
                 "L55",
                 section.line(),
-                String.format(
-                    Locale.ROOT,
-                    "%s is a section that the standard does not know: kept as text",
+                Words.fill(
+                    "{} is a section that the standard does not know: kept as text",
                     section.title().strip()));
         case SET_DATA ->
             quirks.note(
                 "L55",
                 section.line(),
-                String.format(
-                    Locale.ROOT, "%s is a data set beside the log", section.title().strip()));
+                Words.fill("{} is a data set beside the log", section.title().strip()));
         default -> {}
       }
     }
@@ -144,9 +140,8 @@ final class HeadChecks {
           quirks.caution(
               "L37",
               item.line(),
-              String.format(
-                      Locale.ROOT,
-                      "%s stands twice, first on line %d, with %s: the ",
+              Words.fill(
+                      "{} stands twice, first on line {}, with {}: the ",
                       item.mnemonic(),
                       other.line(),
                       isSame ? "the same value" : "another value")

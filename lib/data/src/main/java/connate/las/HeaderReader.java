@@ -121,8 +121,7 @@ final class HeaderReader {
   }
 
   private static String described(HeaderLine item) {
-    return String.format(
-        Locale.ROOT, "'%s' as the name, '%s' as the value", item.mnemonic(), item.value());
+    return Words.fill("'{}' as the name, '{}' as the value", item.mnemonic(), item.value());
   }
 
   /** Tells of blank lines and foreign characters, once for the file. */
@@ -170,7 +169,7 @@ final class HeaderReader {
     throw text.refusal(
         item,
         "L06",
-        String.format(Locale.ROOT, "VERS is '%s', where 1.2, 2.0 or 3.0 was expected", stated),
+        Words.fill("VERS is '{}', where 1.2, 2.0 or 3.0 was expected", stated),
         "correct the VERS line");
   }
 

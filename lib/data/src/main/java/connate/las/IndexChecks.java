@@ -85,9 +85,8 @@ final class IndexChecks {
       quirks.caution(
           "L49",
           header.line(),
-          String.format(
-              Locale.ROOT,
-              "STRT is in %s, the curve %s in %s: the curve's unit is taken",
+          Words.fill(
+              "STRT is in {}, the curve {} in {}: the curve's unit is taken",
               well.startUnit(),
               header.mnemonic(),
               header.unit()));
@@ -105,9 +104,8 @@ final class IndexChecks {
       quirks.caution(
           "L31",
           well.line(0),
-          String.format(
-              Locale.ROOT,
-              "STRT is %s, but the data run the other way, from %s to %s: kept as they stand",
+          Words.fill(
+              "STRT is {}, but the data run the other way, from {} to {}: kept as they stand",
               plain(well.start()),
               plain(first),
               plain(last)));
@@ -116,8 +114,7 @@ final class IndexChecks {
     if (end != stop && !Double.isNaN(stop)) {
       boolean isNoise = Math.abs(end - stop) <= NOISE * Math.max(Math.abs(well.step()), 1e-3);
       String message =
-          String.format(
-              Locale.ROOT, "STOP is %s, but the data end at %s", plain(well.stop()), plain(end));
+          Words.fill("STOP is {}, but the data end at {}", plain(well.stop()), plain(end));
       if (isNoise) {
         quirks.note("L33", well.line(1), message);
       } else {
@@ -175,17 +172,14 @@ final class IndexChecks {
       quirks.caution(
           "L34",
           text.lineOf(columns.offset(repeated)),
-          String.format(Locale.ROOT, "the index %s comes twice", plain(at(repeated))));
+          Words.fill("the index {} comes twice", plain(at(repeated))));
     }
     if (turned > 0) {
       quirks.caution(
           "L35",
           text.lineOf(columns.offset(turned)),
-          String.format(
-              Locale.ROOT,
-              "the index turns back, from %s to %s",
-              plain(at(turned - 1)),
-              plain(at(turned))));
+          Words.fill(
+              "the index turns back, from {} to {}", plain(at(turned - 1)), plain(at(turned))));
     }
   }
 
@@ -203,9 +197,8 @@ final class IndexChecks {
       quirks.caution(
           "L32",
           text.lineOf(columns.offset(uneven)),
-          String.format(
-              Locale.ROOT,
-              "the step is uneven here: from %s to %s, where STEP is %s; widest step %s",
+          Words.fill(
+              "the step is uneven here: from {} to {}, where STEP is {}; widest step {}",
               plain(at(uneven - 1)),
               plain(at(uneven)),
               plain(well.step()),
@@ -218,9 +211,8 @@ final class IndexChecks {
       quirks.caution(
           "L31",
           well.line(2),
-          String.format(
-              Locale.ROOT,
-              "STEP is %s, but the index runs the other way: by %s",
+          Words.fill(
+              "STEP is {}, but the index runs the other way: by {}",
               plain(well.step()),
               plain(step)));
     }
@@ -228,8 +220,7 @@ final class IndexChecks {
       quirks.caution(
           "L32",
           well.line(2),
-          String.format(
-              Locale.ROOT, "STEP is %s, but the data step by %s", plain(well.step()), plain(step)));
+          Words.fill("STEP is {}, but the data step by {}", plain(well.step()), plain(step)));
     }
   }
 

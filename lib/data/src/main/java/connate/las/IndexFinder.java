@@ -48,14 +48,14 @@ final class IndexFinder {
 
   /** Returns the index and the order. */
   Found find(String asked) {
-    int[] order = labelled == null ? Labels.identity(curves.size()) : labelled;
+    int[] order = labelled == null ? ColumnLabels.identity(curves.size()) : labelled;
     if (!asked.isEmpty()) {
       return new Found(asked(asked), order);
     }
     if (columns.rows() == 0) {
       return new Found(0, order);
     }
-    if (labelled != null && !Labels.isIdentity(labelled)) {
+    if (labelled != null && !ColumnLabels.isIdentity(labelled)) {
       return byLabels();
     }
     int named = named();
@@ -100,9 +100,8 @@ final class IndexFinder {
         "L30",
         curves.get(curve).line(),
         "the curve section lists the columns in another order than the labels of the data: "
-            + String.format(
-                Locale.ROOT,
-                "ordered by the labels, where %s is column %d and starts at STRT",
+            + Words.fill(
+                "ordered by the labels, where {} is column {} and starts at STRT",
                 curves.get(curve).mnemonic(),
                 labelled[curve] + 1));
     return new Found(curve, labelled);
@@ -126,9 +125,8 @@ final class IndexFinder {
       quirks.caution(
           "L30",
           curves.get(named).line(),
-          String.format(
-              Locale.ROOT,
-              "the index %s is not the first curve: found in column %d, which starts at STRT",
+          Words.fill(
+              "the index {} is not the first curve: found in column {}, which starts at STRT",
               curves.get(named).mnemonic(),
               named + 1));
       return new Found(named, order);
@@ -137,8 +135,7 @@ final class IndexFinder {
       return new Found(0, order);
     }
     if (first) {
-      throw contradiction(
-          named, String.format(Locale.ROOT, "column 1, listed as %s,", curves.get(0).mnemonic()));
+      throw contradiction(named, Words.fill("column 1, listed as {},", curves.get(0).mnemonic()));
     }
     throw noStart(named);
   }
@@ -148,9 +145,8 @@ final class IndexFinder {
     return text.refusal(
         line,
         "L10",
-        String.format(
-            Locale.ROOT,
-            "%s is listed as curve %d, but %s: STRT is %s, and that column starts at %s",
+        Words.fill(
+            "{} is listed as curve {}, but {}: STRT is {}, and that column starts at {}",
             line.mnemonic(),
             curve + 1,
             other,
@@ -172,9 +168,8 @@ final class IndexFinder {
     String where = others.isEmpty() ? "no column starts there" : others + " would";
     String name = curves.get(curve).mnemonic();
     String message =
-        String.format(
-            Locale.ROOT,
-            "STRT is %s, but %s starts at %s; %s",
+        Words.fill(
+            "STRT is {}, but {} starts at {}; {}",
             plain(well.start()),
             name,
             plain(first(curve)),

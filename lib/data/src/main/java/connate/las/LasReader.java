@@ -38,7 +38,7 @@ final class LasReader {
             ? new WrappedScan(text, block, quirks, options.settingAside()).run()
             : new RowScan(text, block, layout, quirks, options.settingAside()).run();
     IndexWords well = well(head);
-    int[] labels = Labels.order(text, data, lines);
+    int[] labels = ColumnLabels.order(text, data, lines);
     IndexFinder.Found found =
         new IndexFinder(text, well, lines, columns, labels, quirks).find(options.index());
     int column = found.order()[found.curve()];
@@ -46,15 +46,13 @@ final class LasReader {
       throw text.refusal(
           lines.get(found.curve()),
           "L17",
-          String.format(
-              Locale.ROOT, "the index %s holds text", lines.get(found.curve()).mnemonic()),
+          Words.fill("the index {} holds text", lines.get(found.curve()).mnemonic()),
           "give the index as a number: depth, or seconds from a start");
     }
     new IndexChecks(text, well, lines.get(found.curve()), columns, column, quirks).run();
     List<LasCurve> curves = curves(lines, columns, found, head.nullValue());
     List<LasSet> sets =
-        new SetReader(text, quirks, stated(head).delimiter(), head.nullValue())
-            .read(head.sections());
+        new SetReader(quirks, stated(head).delimiter(), head.nullValue()).read(head.sections());
     return new LasFile(text.file, bytes, head, curves, found.curve(), sets, quirks.sorted());
   }
 

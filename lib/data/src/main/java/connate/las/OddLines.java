@@ -121,8 +121,8 @@ final class OddLines {
     boolean isComma = number.kind() == LooseNumber.Kind.COMMA;
     String message =
         isComma
-            ? "'%s' in curve %d: the comma may split thousands or decimals"
-            : "'%s' in curve %d is not a number";
+            ? "'{}' in curve {}: the comma may split thousands or decimals"
+            : "'{}' in curve {} is not a number";
     String help =
         isComma
             ? "write a point before the decimals and nothing between thousands"
@@ -137,7 +137,7 @@ final class OddLines {
                 at,
                 text.offset(from, line, place[1]),
                 isComma ? "L14" : "L08",
-                String.format(Locale.ROOT, message, item, column + 1),
+                Words.fill(message, item, column + 1),
                 help)));
   }
 
@@ -153,11 +153,7 @@ final class OddLines {
                 at,
                 text.offset(from, line, place[1]),
                 "L07",
-                String.format(
-                    Locale.ROOT,
-                    "row of %d values, where ~C lists %d curves",
-                    places.size(),
-                    columns),
+                Words.fill("row of {} values, where ~C lists {} curves", places.size(), columns),
                 "correct the row, or set such rows aside with LasOptions.STRICT.settingRowsAside()")));
   }
 
@@ -249,9 +245,8 @@ final class OddLines {
     quirks.caution(
         "L43",
         last.fault.line(),
-        String.format(
-            Locale.ROOT,
-            "the data end in a fragment of %d values, where %d were expected: left out",
+        Words.fill(
+            "the data end in a fragment of {} values, where {} were expected: left out",
             last.items,
             columns.count()));
     misfits.remove(last);

@@ -7,13 +7,11 @@ import java.util.Locale;
 /** Reads the data sets beside the log of a version 3.0 file. */
 final class SetReader {
 
-  private final LasText text;
   private final Quirks quirks;
   private final byte delimiter;
   private final double nullValue;
 
-  SetReader(LasText text, Quirks quirks, byte delimiter, double nullValue) {
-    this.text = text;
+  SetReader(Quirks quirks, byte delimiter, double nullValue) {
     this.quirks = quirks;
     this.delimiter = delimiter;
     this.nullValue = nullValue;
@@ -42,8 +40,7 @@ final class SetReader {
       quirks.caution(
           "L55",
           data.line(),
-          String.format(
-              Locale.ROOT, "%s has no definition %s: left out", data.title().strip(), definition));
+          Words.fill("{} has no definition {}: left out", data.title().strip(), definition));
       return;
     }
     LasSection parameters = named(sections, word.replaceFirst("(?i)_DATA", "_PARAMETER"));
@@ -88,11 +85,7 @@ final class SetReader {
         quirks.caution(
             "L55",
             line,
-            String.format(
-                Locale.ROOT,
-                "row of %d items, where %d are defined: left out",
-                items.size(),
-                columns));
+            Words.fill("row of {} items, where {} are defined: left out", items.size(), columns));
         continue;
       }
       items.replaceAll(i -> NumberScan.plain(i) == nullValue ? "" : i.strip());

@@ -47,10 +47,7 @@ final class WellLabels {
         quirks.caution(
             "L50",
             item.line(),
-            String.format(
-                    Locale.ROOT,
-                    "%s has its value after the colon, as in version 1.2: ",
-                    item.mnemonic())
+            Words.fill("{} has its value after the colon, as in version 1.2: ", item.mnemonic())
                 + "read '"
                 + behind
                 + "'");
@@ -65,10 +62,7 @@ final class WellLabels {
         quirks.caution(
             "L50",
             item.line(),
-            String.format(
-                    Locale.ROOT,
-                    "%s has its value before the colon, as in version 2.0: ",
-                    item.mnemonic())
+            Words.fill("{} has its value before the colon, as in version 2.0: ", item.mnemonic())
                 + "read '"
                 + before
                 + "'");

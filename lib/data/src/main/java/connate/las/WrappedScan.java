@@ -68,9 +68,8 @@ final class WrappedScan {
             lineFrom,
             at,
             "L12",
-            String.format(
-                Locale.ROOT,
-                "the row that starts at line %d runs over: more than %d values",
+            Words.fill(
+                "the row that starts at line {} runs over: more than {} values",
                 text.lineOf(rowFrom),
                 columns.count()));
         return;
@@ -97,9 +96,8 @@ final class WrappedScan {
           lineFrom,
           lineFrom,
           "L12",
-          String.format(
-                  Locale.ROOT,
-                  "a row starts with %d values on its first line, where the first row starts with %d: ",
+          Words.fill(
+                  "a row starts with {} values on its first line, where the first row starts with {}: ",
                   items,
                   firstShape.get(0))
               + "a value of the row above is missing");
@@ -125,8 +123,7 @@ final class WrappedScan {
             rowFrom,
             at,
             "L08",
-            String.format(
-                Locale.ROOT, "'%s' in curve %d is not a number", text.text(at, end), filled + 1));
+            Words.fill("'{}' in curve {} is not a number", text.text(at, end), filled + 1));
         return -1;
       }
       tally.item(loose.kind(), at);
@@ -161,9 +158,8 @@ final class WrappedScan {
       quirks.caution(
           "L43",
           text.lineOf(rowFrom),
-          String.format(
-              Locale.ROOT,
-              "the data end in a fragment of %d values, where %d were expected: left out",
+          Words.fill(
+              "the data end in a fragment of {} values, where {} were expected: left out",
               filled,
               columns.count()));
     }

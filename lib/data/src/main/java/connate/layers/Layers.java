@@ -13,6 +13,11 @@ import connate.quantity.Units;
 import connate.series.Estimate;
 import connate.series.Listed;
 import connate.series.Listing;
+import connate.well.Tops;
+import connate.well.Well;
+import connate.well.Wells;
+import connate.well.Zone;
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Objects;
@@ -52,6 +57,25 @@ public final class Layers implements Listed {
       throw new IllegalArgumentException("no layer: do the wells of tops and logs have one name?");
     }
     return new Layers(layers, "");
+  }
+
+  /**
+   * Returns the zones of all wells that have tops, with the logs in them.
+   *
+   * @throws IllegalArgumentException if no well of the logs has tops
+   */
+  public static Layers of(Wells wells, Tops tops) {
+    List<Layer> layers = new ArrayList<>();
+    for (Well well : wells) {
+      if (tops.has(well.name())) {
+        for (Zone zone : tops.zones(well)) {
+          layers.add(
+              Layer.of(
+                  well.name(), zone.name(), zone.top(), zone.base(), well.depth(), well.curves()));
+        }
+      }
+    }
+    return of(layers);
   }
 
   /** Returns the layers. */

@@ -10,11 +10,11 @@ import java.util.Set;
  * The column names that many files print on the title line of the data, or on a comment beside it.
  * They tell the true order of the columns where the curve section has another.
  */
-final class Labels {
+final class ColumnLabels {
 
   private static final Set<String> DEPTHS = Set.of("DEPT", "DEPTH", "DEP");
 
-  private Labels() {}
+  private ColumnLabels() {}
 
   /**
    * Returns for each curve the column that the labels give it, null where no label line names all
