@@ -1,7 +1,5 @@
 package connate.las;
 
-import java.util.Locale;
-
 /** Compares the index with what the well section says of it, and looks along it. */
 final class IndexChecks {
 

@@ -3,7 +3,6 @@ package connate.las;
 import connate.quantity.Numbers;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Set;
 
 /**

@@ -3,7 +3,6 @@ package connate.las;
 import connate.las.LasSection.Kind;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 
 /** Reads a file from its bytes, section by section. */
 final class LasReader {

@@ -4,7 +4,6 @@ import connate.fault.DataException;
 import connate.fault.Fault;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 
 /** Takes the lines of data that are no plain row of numbers, and judges them at the end. */
 final class OddLines {

@@ -4,7 +4,6 @@ import connate.fault.DataException;
 import connate.fault.Fault;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 
 /**
  * Reads wrapped data: the index alone on a line, then the other values over several lines. A row
