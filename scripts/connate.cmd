@@ -52,7 +52,7 @@ for /d %%D in ("%made%\build-*") do if /i not "%%~nxD"=="%build%" rd /s /q "%%D"
 :archive
 set "here=%made%\%build%"
 set "archives=%here%\java-%version%"
-set "flags=-XX:+UseSerialGC -XX:TieredStopAtLevel=1 -Xshare:auto -Xlog:disable -Xlog:all=error:stderr"
+set "flags=-XX:+UseSerialGC -XX:TieredStopAtLevel=1 -XX:-UsePerfData -XX:+DisplayVMOutputToStderr -Xshare:auto -Xlog:disable -Xlog:all=error:stderr"
 if exist "%archives%" goto :go
 mkdir "%archives%"
 set "JDK_JAVA_OPTIONS=-XX:DumpLoadedClassList="%archives:\=/%/engine.list""

@@ -5,6 +5,7 @@ import com.tngtech.archunit.core.domain.JavaClass;
 import com.tngtech.archunit.lang.ArchCondition;
 import com.tngtech.archunit.lang.ConditionEvents;
 import com.tngtech.archunit.lang.SimpleConditionEvent;
+import java.lang.reflect.Executable;
 import java.util.Set;
 import java.util.TreeSet;
 import java.util.stream.Collectors;
@@ -18,33 +19,30 @@ final class Forbidden {
   /** Adds a method with these parameters. */
   Forbidden method(Class<?> owner, String name, Class<?>... parameters) {
     try {
-      owner.getMethod(name, parameters);
+      members.add(fullName(owner.getMethod(name, parameters), name));
     } catch (NoSuchMethodException e) {
       throw new IllegalArgumentException(e);
     }
-    members.add(fullName(owner, name, parameters));
     return this;
   }
 
   /** Adds a constructor with these parameters. */
   Forbidden constructor(Class<?> owner, Class<?>... parameters) {
     try {
-      owner.getConstructor(parameters);
+      members.add(fullName(owner.getConstructor(parameters), "<init>"));
     } catch (NoSuchMethodException e) {
       throw new IllegalArgumentException(e);
     }
-    members.add(fullName(owner, "<init>", parameters));
     return this;
   }
 
   /** Adds a field. */
   Forbidden field(Class<?> owner, String name) {
     try {
-      owner.getField(name);
+      members.add(owner.getField(name).getDeclaringClass().getName() + "." + name);
     } catch (NoSuchFieldException e) {
       throw new IllegalArgumentException(e);
     }
-    members.add(owner.getName() + "." + name);
     return this;
   }
 
@@ -79,9 +77,10 @@ final class Forbidden {
     };
   }
 
-  private static String fullName(Class<?> owner, String name, Class<?>... parameters) {
-    return Stream.of(parameters)
+  private static String fullName(Executable member, String name) {
+    return Stream.of(member.getParameterTypes())
         .map(Class::getName)
-        .collect(Collectors.joining(", ", owner.getName() + "." + name + "(", ")"));
+        .collect(
+            Collectors.joining(", ", member.getDeclaringClass().getName() + "." + name + "(", ")"));
   }
 }
