@@ -40,9 +40,16 @@ final class Javac {
             "-XDstringConcat=inline");
   }
 
-  /** Parses and attributes a source file. */
+  /** Parses and checks a source file, ready to be generated. */
   Pass pass(Sheet sheet) {
-    return new Pass(sheet);
+    return new Pass(sheet, options);
+  }
+
+  /** Parses and attributes a source file, as far as types need it. */
+  Pass typePass(Sheet sheet) {
+    List<String> less = new ArrayList<>(options.subList(0, options.size() - 1));
+    less.addAll(List.of("-XDshould-stop.ifError=ATTR", "-XDshould-stop.ifNoError=ATTR"));
+    return new Pass(sheet, less);
   }
 
   /** One source file on its way through the compiler. */
@@ -54,7 +61,7 @@ final class Javac {
     private final CompilationUnitTree unit;
     private final boolean parsed;
 
-    private Pass(Sheet sheet) {
+    private Pass(Sheet sheet, List<String> settings) {
       this.sheet = sheet;
       task =
           (JavacTask)
@@ -62,7 +69,7 @@ final class Javac {
                   null,
                   memory,
                   this::note,
-                  options,
+                  settings,
                   null,
                   List.of(Memory.source(sheet.toString())));
       try {

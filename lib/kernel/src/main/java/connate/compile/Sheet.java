@@ -46,7 +46,9 @@ final class Sheet {
   Sheet copy(int from, String changed) {
     parts.add(new Part(text.length(), changed.length(), from));
     text.append(changed);
-    line += (int) changed.chars().filter(c -> c == '\n').count();
+    for (int at = changed.indexOf('\n'); at >= 0; at = changed.indexOf('\n', at + 1)) {
+      line++;
+    }
     return this;
   }
 

@@ -55,7 +55,7 @@ final class TypePass {
   /** Parses and attributes the commands. */
   Javac.Pass run(Javac javac) {
     write();
-    pass = javac.pass(sheet);
+    pass = javac.typePass(sheet);
     if (pass.isParsed()) {
       trees = pass.trees();
       positions = trees.getSourcePositions();

@@ -441,7 +441,11 @@ final class Grammar {
   }
 
   private static int endLine(Token token) {
-    return token.line() + (int) token.text().chars().filter(c -> c == '\n').count();
+    int newlines = 0;
+    for (int at = token.text().indexOf('\n'); at >= 0; at = token.text().indexOf('\n', at + 1)) {
+      newlines++;
+    }
+    return token.line() + newlines;
   }
 
   /** Returns the token after the bracket that closes the one at a token. */

@@ -63,7 +63,7 @@ final class Splitting {
   private void add(int from, int next, Command.Kind kind) {
     int start = leadingComments(code.get(from).start());
     int end = trailingComment(code.get(next - 1));
-    int line = lineOf(start);
+    int line = lineOf(code.get(from), start);
     int column = start - text.lastIndexOf('\n', start - 1);
     String source = text.substring(start, end);
     commands.add(
@@ -83,16 +83,31 @@ final class Splitting {
 
   /** Takes the prose between the last command and a place; any ends the step before it. */
   private void proseBefore(int place) {
-    List<Token> found =
-        all.stream()
-            .dropWhile(t -> t.start() < done)
-            .takeWhile(t -> t.start() < place)
-            .filter(t -> t.kind() == Token.Kind.PROSE)
-            .toList();
+    List<Token> found = new ArrayList<>();
+    for (int at = firstFrom(done); at < all.size() && all.get(at).start() < place; at++) {
+      if (all.get(at).kind() == Token.Kind.PROSE) {
+        found.add(all.get(at));
+      }
+    }
     if (!found.isEmpty()) {
       closeStep();
-      prose = new ArrayList<>(found);
+      prose = found;
     }
+  }
+
+  /** Returns the first of all tokens that begins at a place or after it. */
+  private int firstFrom(int place) {
+    int low = 0;
+    int high = all.size();
+    while (low < high) {
+      int middle = (low + high) >>> 1;
+      if (all.get(middle).start() < place) {
+        low = middle + 1;
+      } else {
+        high = middle;
+      }
+    }
+    return low;
   }
 
   private void closeStep() {
@@ -148,15 +163,10 @@ final class Splitting {
   /** Returns where the comments begin that stand over a command. */
   private int leadingComments(int start) {
     int begin = start;
-    for (Token token : all) {
-      if (token.start() >= start) {
-        return begin;
-      }
-      if (token.start() >= done && token.kind() == Token.Kind.COMMENT && begin == start) {
-        begin = token.start();
-      } else if (token.kind() == Token.Kind.PROSE) {
-        begin = start;
-      }
+    int at = firstFrom(start) - 1;
+    while (at >= 0 && all.get(at).start() >= done && all.get(at).kind() == Token.Kind.COMMENT) {
+      begin = all.get(at).start();
+      at--;
     }
     return begin;
   }
@@ -165,22 +175,24 @@ final class Splitting {
   private int trailingComment(Token last) {
     int line = last.line() + newlines(last.text());
     int end = last.end();
-    for (Token token : all) {
-      if (token.start() >= end && token.line() == line) {
-        if (token.kind() != Token.Kind.COMMENT) {
-          return end;
-        }
-        end = token.end();
+    for (int at = firstFrom(end); at < all.size() && all.get(at).line() == line; at++) {
+      if (all.get(at).kind() != Token.Kind.COMMENT) {
+        return end;
       }
+      end = all.get(at).end();
     }
     return end;
   }
 
-  private int lineOf(int offset) {
-    return 1 + newlines(text.substring(0, offset));
+  private int lineOf(Token first, int start) {
+    return first.line() - newlines(text.substring(start, first.start()));
   }
 
   private static int newlines(String part) {
-    return (int) part.chars().filter(c -> c == '\n').count();
+    int count = 0;
+    for (int at = part.indexOf('\n'); at >= 0; at = part.indexOf('\n', at + 1)) {
+      count++;
+    }
+    return count;
   }
 }

@@ -3,6 +3,7 @@ package connate.workbook;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Arrays;
 import java.util.List;
 
 /** A workbook as it stands in its file, split into steps and commands. Reading it runs nothing. */
@@ -12,6 +13,7 @@ public final class Workbook {
   private final Path folder;
   private final String text;
   private final List<String> lines;
+  private final int[] starts;
   private final List<Step> steps;
   private final List<Command> commands;
 
@@ -20,6 +22,10 @@ public final class Workbook {
     this.folder = folder;
     this.text = text;
     this.lines = List.of(text.split("\n", -1));
+    this.starts = new int[lines.size()];
+    for (int line = 1; line < starts.length; line++) {
+      starts[line] = starts[line - 1] + lines.get(line - 1).length() + 1;
+    }
     this.steps = Splitting.of(text);
     this.commands = steps.stream().flatMap(s -> s.commands().stream()).toList();
   }
@@ -83,11 +89,8 @@ public final class Workbook {
 
   /** Returns the line, counted from 1, of a place in the text. */
   public int lineAt(int offset) {
-    int line = 1;
-    for (int at = text.indexOf('\n'); at >= 0 && at < offset; at = text.indexOf('\n', at + 1)) {
-      line++;
-    }
-    return line;
+    int found = Arrays.binarySearch(starts, offset);
+    return found >= 0 ? found + 1 : -found - 1;
   }
 
   /** Returns the column, counted from 1, of a place in the text. */
