@@ -85,7 +85,7 @@ public final class EngineMain {
   }
 
   private void stop(int command) {
-    teller.whileRunning(
+    teller.stop(
         command,
         () -> {
           Checkpoint.want(true);

@@ -84,7 +84,8 @@ final class Mishap {
     }
     List<Event.Frame> frames = new ArrayList<>();
     for (int at = 0; at <= last && frames.size() < MOST_FRAMES; at++) {
-      if (concernsReader(trace[at].getClassName())) {
+      boolean again = at > 0 && trace[at].equals(trace[at - 1]);
+      if (!again && concernsReader(trace[at].getClassName())) {
         frames.add(frame(trace[at]));
       }
     }
@@ -103,6 +104,10 @@ final class Mishap {
       String file = element.getFileName() == null ? "" : element.getFileName();
       return new Event.Frame(type + "." + element.getMethodName(), file, line);
     }
+    if (UserClasses.isShells(type)) {
+      // the shell alone knows which line of which command this is
+      return new Event.Frame(type + "." + element.getMethodName(), "", line);
+    }
     String owner = classes.shortName(type).orElse("");
     String method = plain(element.getMethodName());
     String dot = owner.isEmpty() || method.isEmpty() ? "" : ".";
@@ -113,6 +118,6 @@ final class Mishap {
     if (method.startsWith("lambda$")) {
       return "lambda";
     }
-    return method.startsWith("$") || method.equals("do_it$") ? "" : method;
+    return method.startsWith("$") ? "" : method;
   }
 }

@@ -89,7 +89,31 @@ public final class Rendering {
     if (depth < DEEPEST && value != null && value.getClass().isArray()) {
       return array(value, depth);
     }
-    return String.valueOf(value);
+    return value == null || hasText(value) ? own(value) : kind(value);
+  }
+
+  /** Returns a value's own text without its place in memory, which no two runs share. */
+  private static String own(Object value) {
+    String place = "@" + Integer.toHexString(System.identityHashCode(value));
+    return String.valueOf(value).replace(place, "");
+  }
+
+  /** Returns whether a value says more of itself than its place in memory. */
+  private static boolean hasText(Object value) {
+    try {
+      return value.getClass().getMethod("toString").getDeclaringClass() != Object.class;
+    } catch (NoSuchMethodException e) {
+      return true;
+    }
+  }
+
+  private static String kind(Object value) {
+    Class<?> type = value.getClass();
+    return type.isHidden() || type.isSynthetic() ? "(function)" : "(" + plain(type) + ")";
+  }
+
+  private static String plain(Class<?> type) {
+    return type.getSimpleName().isEmpty() ? "object" : type.getSimpleName();
   }
 
   private static String series(Series series) {

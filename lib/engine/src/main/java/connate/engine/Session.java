@@ -72,6 +72,7 @@ final class Session {
   /** Runs a command to its last event. */
   void invoke(Request.Invoke invoke) {
     teller.begin(invoke.command(), invoke.muted());
+    Checkpoint.want(teller.isStopped());
     Event last;
     try {
       last = new Event.Returned(invoke.variable(), invoke.type(), result(invoke));

@@ -24,6 +24,7 @@ final class Teller implements Listener {
   private int command = -1;
   private boolean muted;
   private int dropped;
+  private int stopped = -1;
 
   Teller(Channel channel) {
     this.channel = channel;
@@ -51,11 +52,18 @@ final class Teller implements Listener {
     command = -1;
   }
 
-  /** Does something if a command still runs; it cannot end meanwhile. */
-  synchronized void whileRunning(int number, Runnable action) {
+  /** Does something if a command runs, or remembers that it is to be stopped when it begins. */
+  synchronized void stop(int number, Runnable action) {
     if (command == number) {
       action.run();
+    } else {
+      stopped = number;
     }
+  }
+
+  /** Returns whether the running command was to be stopped before it began. */
+  synchronized boolean isStopped() {
+    return command == stopped;
   }
 
   synchronized void tell(Event event) {

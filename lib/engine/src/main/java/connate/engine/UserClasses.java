@@ -5,9 +5,14 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
+import java.util.regex.Pattern;
 
 /** The classes of the user's commands, apart from the library's. */
 final class UserClasses extends ClassLoader {
+
+  /** The class around the user's own: of a workbook, or of one command of a shell. */
+  private static final Pattern WRAPPER =
+      Pattern.compile("^(?:\\$Workbook|REPL\\.\\$JShell\\$[0-9]+[A-Z]*)\\$?");
 
   private final Map<String, byte[]> waiting = new ConcurrentHashMap<>();
 
@@ -35,13 +40,17 @@ final class UserClasses extends ClassLoader {
     return findLoadedClass(name) != null || waiting.containsKey(name);
   }
 
+  /** Returns whether a class of the user's was compiled by the JDK's shell. */
+  static boolean isShells(String name) {
+    return name.startsWith("REPL.");
+  }
+
   /** Returns the user's class of a stack frame, where it is one. */
   Optional<String> shortName(String name) {
     if (!isUsers(name)) {
       return Optional.empty();
     }
-    int dot = name.lastIndexOf('.');
-    int nested = name.indexOf('$', name.startsWith("$", dot + 1) ? dot + 2 : dot + 1);
-    return Optional.of(nested < 0 ? "" : name.substring(nested + 1).replace('$', '.'));
+    String nested = WRAPPER.matcher(name).replaceFirst("");
+    return Optional.of(nested.replace('$', '.'));
   }
 }

@@ -4,14 +4,12 @@ import connate.fault.Fault;
 import connate.workbook.Command;
 import connate.workbook.Workbook;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
-import javax.tools.Diagnostic;
 
 /** Says in plain words what the compiler found, at the workbook's own line and column. */
-final class Complaint {
+public final class Complaint {
 
   private static final Pattern SYMBOL = Pattern.compile("symbol:\\s+(\\S+) (.+)");
   private static final Pattern WHERE = Pattern.compile("location:\\s+(.+)");
@@ -25,20 +23,28 @@ final class Complaint {
 
   private final Workbook workbook;
 
-  Complaint(Workbook workbook) {
+  /** Makes complaints about a workbook. */
+  public Complaint(Workbook workbook) {
     this.workbook = workbook;
   }
 
-  /** Returns the problem that a diagnostic tells. */
-  Problem of(Diagnostic<?> diagnostic, int offset, int length, Command command) {
-    String text = diagnostic.getMessage(Locale.ENGLISH).replace(Header.OWNER + ".", "");
-    String plain = PLAIN.get(diagnostic.getCode());
-    String message = plain == null ? words(diagnostic.getCode(), text) : plain;
-    return of(offset, length, command, message, help(diagnostic.getCode(), text, command));
+  /**
+   * Returns the problem that the compiler tells.
+   *
+   * @param code the compiler's code for it
+   * @param text the compiler's words
+   * @param offset the place in the workbook
+   * @param length how many letters are meant
+   */
+  public Problem of(String code, String text, int offset, int length, Command command) {
+    String bare = text.replace(Header.OWNER + ".", "");
+    String plain = PLAIN.get(code);
+    String message = plain == null ? words(code, bare) : plain;
+    return of(offset, length, command, message, help(code, bare, command));
   }
 
   /** Returns a problem at a place. */
-  Problem of(int offset, int length, Command command, String message, String help) {
+  public Problem of(int offset, int length, Command command, String message, String help) {
     int place = Math.min(offset, workbook.text().length());
     int line = workbook.lineAt(place);
     int column = workbook.columnAt(place);

@@ -1,6 +1,7 @@
 package connate.compile;
 
 import java.util.List;
+import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import javax.lang.model.element.TypeElement;
 import javax.lang.model.type.ArrayType;
@@ -17,14 +18,40 @@ import javax.lang.model.type.WildcardType;
  * @param text the type in full, empty where it cannot be written down
  * @param exact whether the text is the type itself, not one a little wider
  */
-record TypeName(String text, boolean exact) {
+public record TypeName(String text, boolean exact) {
 
   private static final int DEEPEST = 6;
+  private static final Pattern COMMA = Pattern.compile(",\\s*");
+  private static final Pattern QUALIFIER =
+      Pattern.compile("\\b(?:[a-z_][A-Za-z0-9_]*\\.)+(?=[A-Z$])");
   private static final TypeName NONE = new TypeName("", false);
 
   /** Writes a type. */
-  static TypeName of(TypeMirror type) {
+  public static TypeName of(TypeMirror type) {
     return of(type, 0);
+  }
+
+  /** Returns the type as a reader wants it: without packages, of several bounds the first. */
+  String shown() {
+    return simple(exact ? text : text.replace("? extends ", ""));
+  }
+
+  /** Returns a type's text as a reader wants it: without packages, of several bounds the first. */
+  public static String simple(String type) {
+    String bare = QUALIFIER.matcher(type).replaceAll("").replace(Header.OWNER + ".", "");
+    StringBuilder out = new StringBuilder();
+    int depth = 0;
+    int skipping = -1;
+    for (char c : bare.toCharArray()) {
+      depth -= c == '>' ? 1 : 0;
+      skipping = skipping > depth || skipping == depth && c == ',' ? -1 : skipping;
+      skipping = skipping < 0 && c == '&' ? depth : skipping;
+      if (skipping < 0) {
+        out.append(c);
+      }
+      depth += c == '<' ? 1 : 0;
+    }
+    return COMMA.matcher(out).replaceAll(", ");
   }
 
   boolean isWritten() {

@@ -170,9 +170,13 @@ final class TypePass {
     boolean expression = command.kind() == Command.Kind.EXPRESSION;
     ExpressionTree value = tree.getInitializer();
     boolean isVoid = expression && isVoid(path, value);
-    boolean broken = !isVoid && (type == null || type.getKind() == TypeKind.ERROR);
+    boolean isNull = value != null && value.getKind() == Tree.Kind.NULL_LITERAL && expression;
+    boolean broken = !isVoid && !isNull && (type == null || type.getKind() == TypeKind.ERROR);
     String name = expression ? assigned(value) : tree.getName().toString();
-    TypeName typeName = isVoid || broken ? new TypeName("", false) : TypeName.of(type);
+    TypeName typeName =
+        isNull
+            ? new TypeName("java.lang.Object", true)
+            : isVoid || broken ? new TypeName("", false) : TypeName.of(type);
     if (value == null) {
       return new Variable(name, typeName, isVoid, broken, -1, -1, false);
     }

@@ -6,6 +6,7 @@ import connate.workbook.Workbook;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
 import javax.lang.model.element.Element;
@@ -127,7 +128,14 @@ public final class WholeCompiler {
     }
     int offset = pass.sheet().offset(place(told));
     int length = (int) (told.getEndPosition() - told.getPosition());
-    take(complaint.of(told, Math.max(offset, first.codeStart()), length, first), first);
+    take(
+        complaint.of(
+            told.getCode(),
+            told.getMessage(Locale.ENGLISH),
+            Math.max(offset, first.codeStart()),
+            length,
+            first),
+        first);
   }
 
   private static long place(Diagnostic<?> diagnostic) {
@@ -166,17 +174,11 @@ public final class WholeCompiler {
               command.index(),
               method,
               last == null ? "" : last.name(),
-              last == null ? "" : simple(last.type().text()),
+              last == null ? "" : last.type().shown(),
               names(references.reach(element)),
               names(references.sets(method))));
     }
     return entries;
-  }
-
-  /** Returns a type's text without packages. */
-  public static String simple(String type) {
-    return type.replaceAll("\\b(?:[a-z_][A-Za-z0-9_]*\\.)+(?=[A-Z$])", "")
-        .replace(Header.OWNER + ".", "");
   }
 
   private static Set<String> names(Set<Element> elements) {

@@ -60,9 +60,9 @@ final class Engine implements AutoCloseable {
    * {@link Event.Failed}.
    */
   Event invoke(Request.Invoke invoke, Consumer<Event> told) {
-    running = invoke.command();
     try {
       send(invoke);
+      running = invoke.command();
       return gone ? lost() : await(invoke.command(), told);
     } finally {
       running = -1;

@@ -4,6 +4,7 @@ import connate.compile.Compilation;
 import connate.compile.WholeCompiler;
 import connate.protocol.Request;
 import connate.workbook.Workbook;
+import java.nio.file.Path;
 
 /** One run of a workbook from top to bottom in a fresh engine. */
 public final class Replay {
@@ -33,22 +34,38 @@ public final class Replay {
 
   /** Runs the commands and returns when the last has ended, one failed, or {@link #stop} came. */
   public ReplayOutcome run() {
+    Request.Begin begin = begin(workbook.name(), workbook.folder(), settings);
+    if (settings.way() == ReplaySettings.Way.SHELL) {
+      return commandByCommand(begin, "");
+    }
+    Compilation compilation = WholeCompiler.compile(workbook, EngineProcess.classPath());
+    if (!compilation.isUsable()) {
+      if (settings.way() == ReplaySettings.Way.WHOLE) {
+        engine.close();
+        throw new IllegalArgumentException("cannot be compiled at once: " + compilation.why());
+      }
+      return commandByCommand(begin, compilation.why());
+    }
     try (engine) {
-      engine.begin(begin(workbook, settings));
-      Compilation compilation = WholeCompiler.compile(workbook, EngineProcess.classPath());
+      engine.begin(begin);
       new WholeRun(workbook, compilation, engine, watch).run();
       return watch.outcome(ReplaySettings.Way.WHOLE, "");
     }
   }
 
-  static Request.Begin begin(Workbook workbook, ReplaySettings settings) {
+  private ReplayOutcome commandByCommand(Request.Begin begin, String why) {
+    ShellControl control =
+        new ShellControl(engine, null, begin, Verdict.of(workbook.name(), settings));
+    try (Shell shell = new Shell(control, workbook.name())) {
+      new ShellRun(workbook, shell, watch).run();
+      return watch.outcome(ReplaySettings.Way.SHELL, why);
+    }
+  }
+
+  static Request.Begin begin(String name, Path folder, ReplaySettings settings) {
     String data = settings.data() == null ? "" : settings.data().toAbsolutePath().toString();
     return new Request.Begin(
-        workbook.name(),
-        workbook.folder().toString(),
-        data,
-        settings.assumptions(),
-        settings.seed());
+        name, folder.toString(), data, settings.assumptions(), settings.seed());
   }
 
   /** Stops the run from another thread; {@link #run} then returns with what was done so far. */

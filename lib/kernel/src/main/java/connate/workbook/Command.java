@@ -91,6 +91,13 @@ public record Command(
     return names;
   }
 
+  /** Returns the code with the semicolon that it lacks; an expression needs none. */
+  public String closedCode() {
+    String code = code();
+    boolean closed = code.endsWith(";") || code.endsWith("}") && kind != Kind.VARIABLE;
+    return closed || kind == Kind.EXPRESSION ? code : code + ";";
+  }
+
   /**
    * Returns the code with blanks in place of the modifiers that mean nothing at the top of a
    * workbook: access, {@code static}, {@code final}.

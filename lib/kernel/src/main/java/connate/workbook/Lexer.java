@@ -64,7 +64,9 @@ final class Lexer {
   private void take(Token.Kind kind, int end) {
     String part = text.substring(at, end);
     tokens.add(new Token(kind, at, end, line, part));
-    for (int newline = part.indexOf('\n'); newline >= 0; newline = part.indexOf('\n', newline + 1)) {
+    for (int newline = part.indexOf('\n');
+        newline >= 0;
+        newline = part.indexOf('\n', newline + 1)) {
       line++;
     }
     at = end;
