@@ -3,6 +3,7 @@ package connate.engine;
 import connate.fault.DataException;
 import connate.fault.Fault;
 import connate.protocol.Event;
+import connate.well.Wells;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -21,10 +22,19 @@ public final class Inputs {
 
   private final Path folder;
   private final Path data;
+  private final boolean guarded;
 
-  Inputs(Path folder, Path data) {
+  /**
+   * Makes the inputs of a workbook.
+   *
+   * @param folder the workbook's folder
+   * @param data the data folder, {@code null} for none
+   * @param guarded whether files outside of the two are refused
+   */
+  Inputs(Path folder, Path data, boolean guarded) {
     this.folder = folder;
     this.data = data;
+    this.guarded = guarded;
   }
 
   /**
@@ -63,6 +73,24 @@ public final class Inputs {
     }
   }
 
+  /**
+   * Reads the files that a pattern names, in the order of their names: those of the workbook's
+   * folder, or where there are none, those of the data folder.
+   */
+  List<Input> matching(String pattern) {
+    List<Path> own = Wells.files(folder, pattern);
+    List<Path> found = own.isEmpty() && data != null ? Wells.files(data, pattern) : own;
+    if (found.isEmpty()) {
+      throw new DataException(
+          Fault.ofFile(
+              pattern,
+              "W02",
+              "no file fits this pattern",
+              "paths are relative to the workbook's folder; * stands for any letters"));
+    }
+    return found.stream().map(p -> read(shown(p))).toList();
+  }
+
   /** Returns where a file lies that the workbook names. */
   Path resolve(String name) {
     Path own = folder.resolve(name).normalize();
@@ -89,7 +117,27 @@ public final class Inputs {
       throw new DataException(
           Fault.ofFile(name, "F01", "no such file" + places(), Nearest.file(path)));
     }
+    allow(path, name);
     return path;
+  }
+
+  /** Refuses what lies outside of the two folders, also by way of a link. */
+  private void allow(Path path, String name) {
+    if (guarded && !isInside(path, folder) && (data == null || !isInside(path, data))) {
+      throw new Refused(
+          "«"
+              + name
+              + "» lies outside of the workbook's folder; name its folder with --data, or "
+              + "trust the workbook with --trust");
+    }
+  }
+
+  private static boolean isInside(Path path, Path base) {
+    try {
+      return path.toRealPath().startsWith(base.toRealPath());
+    } catch (IOException e) {
+      return false;
+    }
   }
 
   private String places() {

@@ -27,6 +27,9 @@ final class Mishap {
     if (thrown instanceof ExceptionInInitializerError && thrown.getCause() != null) {
       told = thrown.getCause();
     }
+    if (told instanceof Refused) {
+      return new Event.Failed("refused", "", told.getMessage(), frames(told), false);
+    }
     DataException data = dataException(told);
     String kind = told instanceof OutOfMemoryError ? "memory" : "exception";
     String type = (data == null ? told : data).getClass().getName();

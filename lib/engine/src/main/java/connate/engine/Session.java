@@ -23,7 +23,7 @@ final class Session {
   private final Printing err;
   private final Set<String> kept = new HashSet<>();
   private Mishap mishap = new Mishap(classes, "");
-  private Inputs inputs = new Inputs(Path.of("").toAbsolutePath(), null);
+  private Inputs inputs = new Inputs(Path.of("").toAbsolutePath(), null, false);
   private Assumptions assumptions;
   private long seed = 1;
 
@@ -46,7 +46,7 @@ final class Session {
   void begin(Request.Begin begin) {
     Path data = begin.data().isEmpty() ? null : Path.of(begin.data());
     mishap = new Mishap(classes, begin.workbook());
-    inputs = new Inputs(Path.of(begin.folder()), data);
+    inputs = new Inputs(Path.of(begin.folder()), data, begin.guarded());
     assumptions = new Assumptions(begin.assumptions(), teller);
     seed = begin.seed();
   }

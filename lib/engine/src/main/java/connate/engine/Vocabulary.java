@@ -6,6 +6,8 @@ import connate.protocol.Event;
 import connate.protocol.Item;
 import connate.quantity.Quantity;
 import connate.series.Estimate;
+import connate.well.Well;
+import connate.well.Wells;
 import java.util.function.Function;
 
 /** The words of a workbook; its commands see them without a prefix. */
@@ -97,6 +99,19 @@ public final class Vocabulary {
 
   private static Item.Measure measure(Number number) {
     return Measures.find(number).orElseThrow();
+  }
+
+  /** Reads a well from a LAS file. */
+  public static Well well(String file) {
+    return Reading.well(session().inputs().read(file), session().teller());
+  }
+
+  /** Reads the wells whose LAS files a pattern names, such as {@code wells/*.las}. */
+  public static Wells wells(String pattern) {
+    return Wells.of(
+        session().inputs().matching(pattern).stream()
+            .map(input -> Reading.well(input, session().teller()))
+            .toList());
   }
 
   /** Returns draws from the seed of this replay. */

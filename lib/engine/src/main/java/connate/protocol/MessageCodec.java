@@ -21,7 +21,7 @@ final class MessageCodec {
     WireWriter out = new WireWriter();
     if (request instanceof Request.Begin b) {
       out.tag(BEGIN).text(b.workbook()).text(b.folder()).text(b.data());
-      out.map(b.assumptions()).whole(b.seed());
+      out.map(b.assumptions()).whole(b.seed()).flag(b.guarded());
     } else if (request instanceof Request.Load load) {
       out.tag(LOAD).list(load.classes(), (w, c) -> w.text(c.name()).block(c.bytes()));
     } else if (request instanceof Request.Invoke i) {
@@ -47,7 +47,7 @@ final class MessageCodec {
   private static Request request(int tag, WireReader in) throws BadFrame {
     switch (tag) {
       case BEGIN:
-        return new Request.Begin(in.text(), in.text(), in.text(), in.map(), in.whole());
+        return new Request.Begin(in.text(), in.text(), in.text(), in.map(), in.whole(), in.flag());
       case LOAD:
         return new Request.Load(in.list(r -> new Request.Bytecode(r.text(), r.block())));
       case INVOKE:

@@ -14,9 +14,15 @@ public sealed interface Request {
    * @param data the folder in which data are looked for as well, empty for none
    * @param assumptions the assumptions that take another value
    * @param seed the seed of all random numbers
+   * @param guarded whether files outside of the two folders are refused
    */
   record Begin(
-      String workbook, String folder, String data, Map<String, String> assumptions, long seed)
+      String workbook,
+      String folder,
+      String data,
+      Map<String, String> assumptions,
+      long seed,
+      boolean guarded)
       implements Request {}
 
   /**

@@ -65,7 +65,7 @@ public final class Replay {
   static Request.Begin begin(String name, Path folder, ReplaySettings settings) {
     String data = settings.data() == null ? "" : settings.data().toAbsolutePath().toString();
     return new Request.Begin(
-        name, folder.toString(), data, settings.assumptions(), settings.seed());
+        name, folder.toString(), data, settings.assumptions(), settings.seed(), settings.guarded());
   }
 
   /** Stops the run from another thread; {@link #run} then returns with what was done so far. */

@@ -1,0 +1,24 @@
+package connate.engine;
+
+import connate.las.LasFile;
+import connate.series.Series;
+import connate.well.Well;
+import java.util.ArrayList;
+import java.util.List;
+
+/** Makes of an input what the workbook calls for, and tells what was found in it. */
+final class Reading {
+
+  private Reading() {}
+
+  static Well well(Inputs.Input input, Teller teller) {
+    Well well = Well.of(LasFile.parse(input.name(), input.content()));
+    List<String> mapping = new ArrayList<>();
+    mapping.add("well " + well.name() + ", depth in " + well.depth().unit().symbol());
+    for (Series curve : well.curves().values()) {
+      mapping.add(curve.name() + " in " + curve.unit().symbol());
+    }
+    input.told(teller, well.rows(), mapping);
+    return well;
+  }
+}
