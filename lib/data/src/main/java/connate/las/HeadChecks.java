@@ -183,10 +183,10 @@ final class HeadChecks {
     Shown bare = new Shown("L81", "curves without a unit: ");
     for (HeaderLine curve : head.items(Kind.CURVE)) {
       String unit = curve.unit();
-      if (!curve.mnemonic().matches("[A-Za-z0-9_]+")) {
+      if (!isPlainName(curve.mnemonic())) {
         names.add(curve, curve.mnemonic());
       }
-      if (unit.matches(".*[. ].*|_|-|(?i:none|unitless)")) {
+      if (isOddUnit(unit)) {
         units.add(curve, curve.mnemonic() + " '" + unit + "'");
       } else if (unit.isEmpty()) {
         bare.add(curve, curve.mnemonic());
@@ -195,6 +195,22 @@ final class HeadChecks {
     names.tell();
     units.tell();
     bare.tell();
+  }
+
+  private static boolean isPlainName(String name) {
+    for (int i = 0; i < name.length(); i++) {
+      char c = name.charAt(i);
+      boolean isLetter = c >= 'A' && c <= 'Z' || c >= 'a' && c <= 'z';
+      if (!isLetter && !(c >= '0' && c <= '9') && c != '_') {
+        return false;
+      }
+    }
+    return !name.isEmpty();
+  }
+
+  private static boolean isOddUnit(String unit) {
+    boolean isSplit = unit.indexOf('.') >= 0 || unit.indexOf(' ') >= 0;
+    return isSplit || LasCurve.isNone(unit);
   }
 
   private void lineLengths() {

@@ -1,6 +1,5 @@
 package connate.las;
 
-import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 
 /**
@@ -10,7 +9,6 @@ import java.util.regex.Pattern;
  */
 final class HeaderParse {
 
-  private static final Pattern FORMAT = Pattern.compile("\\{[^{}]*}\\s*$");
   private static final Pattern BLANK_UNIT = Pattern.compile("\\d+ [A-Za-z][^ ]*");
 
   private HeaderParse() {}
@@ -24,8 +22,9 @@ final class HeaderParse {
    * Returns a curve's line with a unit such as {@code 1000 lbf}, which holds a blank, put right.
    */
   static HeaderLine withBlankUnit(HeaderLine curve) {
+    boolean isNumber = !curve.unit().isEmpty() && Character.isDigit(curve.unit().charAt(0));
     String both = curve.unit() + " " + curve.value();
-    if (!BLANK_UNIT.matcher(both).matches()) {
+    if (!isNumber || !BLANK_UNIT.matcher(both).matches()) {
       return curve;
     }
     return curve.withUnit(both, "");
@@ -81,8 +80,9 @@ final class HeaderParse {
 
   /** Returns the place of the colon that ends the value, or -1. */
   static int colon(String text) {
-    Matcher braces = FORMAT.matcher(text);
-    int from = (braces.find() ? braces.start() : text.length()) - 1;
+    boolean hasBraces = text.stripTrailing().endsWith("}");
+    int brace = hasBraces ? text.lastIndexOf('{') : -1;
+    int from = (brace >= 0 ? brace : text.length()) - 1;
     for (int i = text.lastIndexOf(':', from); i >= 0; i = text.lastIndexOf(':', i - 1)) {
       if (!isPartOfValue(text, i)) {
         return i;

@@ -61,13 +61,15 @@ public final class LasCurve {
    * Returns the unit as written; empty where there is none, also where the file says so in words.
    */
   public String unit() {
-    String unit = header.unit();
-    boolean isNone =
-        unit.equals("_")
-            || unit.equals("-")
-            || unit.equalsIgnoreCase("NONE")
-            || unit.equalsIgnoreCase("UNITLESS");
-    return isNone ? "" : unit;
+    return isNone(header.unit()) ? "" : header.unit();
+  }
+
+  /** Tells whether a unit is a word for none. */
+  static boolean isNone(String unit) {
+    return unit.equals("_")
+        || unit.equals("-")
+        || unit.equalsIgnoreCase("NONE")
+        || unit.equalsIgnoreCase("UNITLESS");
   }
 
   /** Returns the number of rows. */

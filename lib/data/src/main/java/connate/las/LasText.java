@@ -18,6 +18,7 @@ final class LasText {
   private static final Charset WINDOWS = Charset.forName("windows-1252");
   private static final byte CTRL_Z = 0x1A;
   private static final int STRIDE = 1 << 14;
+  private static final int LONGEST = 1 << 24;
 
   final String file;
   final byte[] bytes;
@@ -124,6 +125,9 @@ final class LasText {
 
   /** Returns a piece as text: ASCII, else UTF-8 where it is valid, else Windows-1252. */
   String text(int start, int end) {
+    if (end - start > LONGEST) {
+      throw refusal("L16", "a line is longer than 16 MiB", "check the file's type");
+    }
     for (int i = start; i < end; i++) {
       if (bytes[i] < 0) {
         return decoded(start, end);

@@ -21,7 +21,8 @@ final class SectionKinds {
   }
 
   private static Kind ofSet(String name, String word) {
-    boolean isLog = name.startsWith("LOG_") && !word.matches(".*\\[0*([2-9]|1\\d+)].*");
+    boolean isRepeat = word.indexOf('[') >= 0 && !word.contains("[1]");
+    boolean isLog = name.startsWith("LOG_") && !isRepeat;
     if (name.endsWith("_DATA")) {
       return isLog ? Kind.DATA : Kind.SET_DATA;
     }

@@ -1,5 +1,6 @@
 package connate.las;
 
+import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -51,6 +52,9 @@ final class Sections {
           "V",
           "O");
 
+  /** Searched piece by piece: the JDK looks for a character in a text many bytes at a time. */
+  private static final int PIECE = 1 << 16;
+
   private final LasText text;
   private final List<Raw> found = new ArrayList<>();
   private int titleFrom = -1;
@@ -67,10 +71,13 @@ final class Sections {
   }
 
   private List<Raw> run() {
-    byte[] b = text.bytes;
-    for (int i = text.from; i < text.to; i++) {
-      if (b[i] == '~' && isFirstInLine(i)) {
-        open(i);
+    for (int from = text.from; from < text.to; from += PIECE) {
+      int length = Math.min(PIECE, text.to - from);
+      String piece = new String(text.bytes, from, length, StandardCharsets.ISO_8859_1);
+      for (int at = piece.indexOf('~'); at >= 0; at = piece.indexOf('~', at + 1)) {
+        if (isFirstInLine(from + at)) {
+          open(from + at);
+        }
       }
     }
     close(text.to);

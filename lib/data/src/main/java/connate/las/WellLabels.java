@@ -79,7 +79,8 @@ final class WellLabels {
       return item.value();
     }
     String tail = left.substring(dot + 1);
-    return item.unit().isEmpty() ? tail.strip() : tail.substring(item.unit().length()).strip();
+    boolean hasUnit = !item.unit().isEmpty() && tail.startsWith(item.unit());
+    return (hasUnit ? tail.substring(item.unit().length()) : tail).strip();
   }
 
   private static boolean isLabel(String name, String words) {

@@ -1,6 +1,7 @@
 package connate.well;
 
 import connate.fault.DataException;
+import connate.fault.Fault;
 import connate.las.HeaderLine;
 import connate.las.LasColumn;
 import connate.las.LasCurve;
@@ -78,9 +79,21 @@ public final class Well implements Listed {
   /**
    * Returns the well of a LAS file. What the reader is cautious about is told to who listens.
    *
-   * @throws IllegalArgumentException if its index is not a depth
+   * @throws DataException if its index is not a depth, or has no unit
    */
   public static Well of(LasFile file) {
+    LasCurve index = file.index();
+    String symbol = index.unit().isEmpty() ? startUnit(file) : index.unit();
+    return of(file, CurveUnits.depth(symbol).orElseThrow(() -> noDepth(file, index, symbol)));
+  }
+
+  /**
+   * Returns the well of a LAS file whose depths are in a unit that the file does not say.
+   *
+   * @param file the file
+   * @param depthUnit the unit of its index
+   */
+  public static Well of(LasFile file, Unit<?> depthUnit) {
     for (Quirk quirk : file.quirks()) {
       if (quirk.isCaution()) {
         String place = quirk.line() == 0 ? "" : " line " + quirk.line();
@@ -89,28 +102,27 @@ public final class Well implements Listed {
       }
     }
     LasCurve index = file.index();
-    String symbol = index.unit().isEmpty() ? startUnit(file) : index.unit();
-    Unit<?> unit =
-        CurveUnits.depth(symbol)
-            .orElseThrow(
-                () ->
-                    new IllegalArgumentException(
-                        file.name()
-                            + ": the index "
-                            + index.name()
-                            + " is in «"
-                            + symbol
-                            + "», which is no unit of depth"));
-    Series depth = Series.over(index.name(), unit, index.values(), null);
+    Series depth = Series.over(index.name(), depthUnit, index.values(), null);
     String named = file.item("WELL").map(HeaderLine::value).orElse("");
-    Well well =
-        new Well(named.isEmpty() ? fileName(file) : named, file.name(), file, depth, Map.of());
+    String name = named.isEmpty() ? fileName(file) : named;
+    Well well = new Well(name, file.name(), file, depth, Map.of());
     for (LasCurve curve : file.curves()) {
       if (curve != index) {
         well.curves.put(key(curve.name()), WellCurve.of(curve, well.depth));
       }
     }
     return well;
+  }
+
+  private static DataException noDepth(LasFile file, LasCurve index, String symbol) {
+    HeaderLine line = index.header();
+    String words =
+        symbol.isEmpty()
+            ? "the index " + index.name() + " has no unit"
+            : "the index " + index.name() + " is in «" + symbol + "», which is no unit of depth";
+    return new DataException(
+        new Fault(file.name(), line.line(), 1, 1, "W04", words, line.text().strip(),
+            "write M or FT behind its dot, or say it: Well.of(file, ft)"));
   }
 
   /** Returns a well without logs yet, over depths that come from elsewhere. */

@@ -2,6 +2,7 @@ package connate.well;
 
 import connate.las.LasFile;
 import connate.las.Quirk;
+import connate.quantity.Length;
 import connate.quantity.Numbers;
 import connate.role.Role;
 import connate.series.Listing;
@@ -43,14 +44,18 @@ final class WellListing {
     StringBuilder out = new StringBuilder(well.name()).append("   ");
     out.append(well.rows()).append(" rows");
     if (well.rows() > 0) {
-      out.append(", ").append(Numbers.text(well.top().number())).append(" to ");
-      out.append(well.base());
-      out.append(well.hasStep() ? ", step " + well.step() : "");
+      out.append(", ").append(Numbers.record(well.top().number())).append(" to ");
+      out.append(written(well.base()));
+      out.append(well.hasStep() ? ", step " + written(well.step()) : "");
     }
     if (file != null) {
       out.append(", from ").append(source).append(" (LAS ").append(file.version()).append(')');
     }
     return out.toString();
+  }
+
+  private static String written(Length depth) {
+    return Numbers.record(depth.number()) + depth.unit().suffix();
   }
 
   private static String role(WellCurve curve) {
@@ -84,10 +89,9 @@ final class WellListing {
       looks.add("no value");
       return looks;
     }
-    if (curve.symbol().isEmpty() && !curve.isAdded()) {
-      looks.add("no unit");
-    } else if (series.unit().equals(Unstated.UNIT)) {
-      looks.add("unit not known");
+    boolean wantsUnit = curve.role().map(Role::unit).isPresent();
+    if (wantsUnit && series.unit().equals(Unstated.UNIT)) {
+      looks.add(curve.symbol().isEmpty() ? "no unit" : "unit not known");
     }
     if (least == greatest && present.length > 1) {
       looks.add("the same in every row");

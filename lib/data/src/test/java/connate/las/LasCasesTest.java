@@ -802,6 +802,13 @@ class LasCasesTest {
   }
 
   @Test
+  void curveSectionWithoutUnitTextAndLongLines() {
+    assertEquals("", wellWith("X.Y:z").item("X").orElseThrow().value());
+    String endless = VERSION + "~O\n" + "x".repeat(17 << 20) + "\n";
+    assertEquals("L16", refused(() -> text(endless + plain())).code());
+  }
+
+  @Test
   void hostileBytesNeverEscapeAsAnotherException() {
     long seed = Long.getLong("seed", 7L);
     java.util.Random random = new java.util.Random(seed);

@@ -234,7 +234,7 @@ class WellTest {
         shown.contains("TH-9   7 rows, 100 to 103 m, step 0.5 m, from th-9.las (LAS 2.0)"), shown);
     assertTrue(shown.contains("bulk density"), shown);
     assertTrue(shown.contains("no unit"), shown);
-    assertTrue(shown.contains("unit not known; the same in every row"), shown);
+    assertTrue(shown.contains("the same in every row"), shown);
     Well odd = well().add("K", Series.of("k", connate.quantity.Units.mD, 1, 2, 3, 4, 5, -6, 2e5));
     assertTrue(odd.toString().contains("2 outside 0 to 100000 mD"), odd.toString());
   }
@@ -315,6 +315,11 @@ class WellTest {
   void indexThatIsNoDepthIsRefused() {
     String time = text().replace("DEPT.M", "TIME.S").replace("STRT.M", "STRT.S");
     LasFile file = LasFile.parse("t.las", time.getBytes(StandardCharsets.UTF_8));
-    assertThrows(IllegalArgumentException.class, () -> Well.of(file));
+    DataException refusal = assertThrows(DataException.class, () -> Well.of(file));
+    assertEquals("t.las:12:1", refusal.faults().get(0).place());
+    String none = text().replace("DEPT.M", "DEPT.").replace("STRT.M", "STRT.");
+    LasFile bare = LasFile.parse("t.las", none.getBytes(StandardCharsets.UTF_8));
+    assertThrows(DataException.class, () -> Well.of(bare));
+    assertEquals(ft, Well.of(bare, ft).depth().unit());
   }
 }
