@@ -121,7 +121,14 @@ public final class Well implements Listed {
             ? "the index " + index.name() + " has no unit"
             : "the index " + index.name() + " is in «" + symbol + "», which is no unit of depth";
     return new DataException(
-        new Fault(file.name(), line.line(), 1, 1, "W04", words, line.text().strip(),
+        new Fault(
+            file.name(),
+            line.line(),
+            1,
+            1,
+            "W04",
+            words,
+            line.text().strip(),
             "write M or FT behind its dot, or say it: Well.of(file, ft)"));
   }
 
