@@ -5,8 +5,8 @@ import java.util.Deque;
 import org.owasp.encoder.Encode;
 
 /**
- * Writes HTML that is well-formed XML too. Names of elements and attributes come from our code alone;
- * every text and attribute value is escaped here, and nowhere else.
+ * Writes HTML that is well-formed XML too. Names of elements and attributes come from our code
+ * alone; every text and attribute value is escaped here, and nowhere else.
  */
 final class Markup {
 

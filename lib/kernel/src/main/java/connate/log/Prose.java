@@ -19,7 +19,8 @@ import org.commonmark.renderer.html.HtmlRenderer;
 
 /**
  * Prose in CommonMark as HTML. Raw HTML shows as text; a link shows its text and its address but
- * leads nowhere; a picture shows its description. So no text of the user reaches a tag or an address.
+ * leads nowhere; a picture shows its description. So no text of the user reaches a tag or an
+ * address.
  */
 final class Prose {
 
@@ -38,28 +39,28 @@ final class Prose {
 
   private Prose() {}
 
-  /** Returns the text of the first heading of the first level, empty where there is none. */
-  static String title(String prose) {
-    for (Node node = PARSER.parse(prose).getFirstChild(); node != null; node = node.getNext()) {
-      if (node instanceof Heading heading && heading.getLevel() == 1) {
-        return words(heading);
-      }
-    }
-    return "";
+  /** Returns whether prose has the heading of the first level that serves as the title. */
+  static boolean hasTitle(String prose) {
+    return title(PARSER.parse(prose)) != null;
   }
 
-  /** Returns prose as HTML, without the heading that serves as the title. */
-  static String html(String prose, String title) {
+  /** Returns prose as HTML, where asked without the heading that serves as the title. */
+  static String html(String prose, boolean withoutTitle) {
     Node document = PARSER.parse(prose);
-    for (Node node = document.getFirstChild(); node != null; node = node.getNext()) {
-      if (node instanceof Heading heading
-          && heading.getLevel() == 1
-          && words(heading).equals(title)) {
-        node.unlink();
-        break;
-      }
+    Node title = withoutTitle ? title(document) : null;
+    if (title != null) {
+      title.unlink();
     }
     return RENDERER.render(document);
+  }
+
+  private static Node title(Node document) {
+    for (Node node = document.getFirstChild(); node != null; node = node.getNext()) {
+      if (node instanceof Heading heading && heading.getLevel() == 1) {
+        return heading;
+      }
+    }
+    return null;
   }
 
   private static String words(Node node) {

@@ -7,25 +7,83 @@ import java.util.Set;
 /**
  * Lets a figure through that holds nothing but drawing. It reads the strict subset of XML that our
  * own drawing code writes (elements, quoted attributes, text with the five entities and character
- * references) and refuses everything else: comments, instructions, document types, CDATA, names that
- * are not on the list, references that leave the figure.
+ * references) and refuses everything else: comments, instructions, document types, CDATA, names
+ * that are not on the list, references that leave the figure.
  */
 final class SvgGate {
 
   private static final Set<String> ELEMENTS =
       Set.of(
-          "svg", "g", "path", "rect", "line", "polyline", "polygon", "circle", "ellipse", "text",
-          "tspan", "title", "desc", "defs", "clipPath", "use");
+          "svg",
+          "g",
+          "path",
+          "rect",
+          "line",
+          "polyline",
+          "polygon",
+          "circle",
+          "ellipse",
+          "text",
+          "tspan",
+          "title",
+          "desc",
+          "defs",
+          "clipPath",
+          "use");
   private static final Set<String> ATTRIBUTES =
       Set.of(
-          "xmlns", "viewBox", "width", "height", "role", "id", "aria-labelledby", "aria-label",
-          "x", "y", "x1", "x2", "y1", "y2", "cx", "cy", "r", "rx", "ry", "d", "points", "dx", "dy",
-          "transform", "fill", "fill-opacity", "fill-rule", "stroke", "stroke-width",
-          "stroke-opacity", "stroke-dasharray", "stroke-dashoffset", "stroke-linecap",
-          "stroke-linejoin", "stroke-miterlimit", "opacity", "clip-path", "clip-rule", "href",
-          "font-family", "font-size", "font-weight", "font-style", "text-anchor", "textLength",
-          "lengthAdjust", "dominant-baseline", "preserveAspectRatio", "clipPathUnits",
-          "shape-rendering", "vector-effect", "focusable");
+          "xmlns",
+          "viewBox",
+          "width",
+          "height",
+          "role",
+          "id",
+          "aria-labelledby",
+          "aria-label",
+          "x",
+          "y",
+          "x1",
+          "x2",
+          "y1",
+          "y2",
+          "cx",
+          "cy",
+          "r",
+          "rx",
+          "ry",
+          "d",
+          "points",
+          "dx",
+          "dy",
+          "transform",
+          "fill",
+          "fill-opacity",
+          "fill-rule",
+          "stroke",
+          "stroke-width",
+          "stroke-opacity",
+          "stroke-dasharray",
+          "stroke-dashoffset",
+          "stroke-linecap",
+          "stroke-linejoin",
+          "stroke-miterlimit",
+          "opacity",
+          "clip-path",
+          "clip-rule",
+          "href",
+          "font-family",
+          "font-size",
+          "font-weight",
+          "font-style",
+          "text-anchor",
+          "textLength",
+          "lengthAdjust",
+          "dominant-baseline",
+          "preserveAspectRatio",
+          "clipPathUnits",
+          "shape-rendering",
+          "vector-effect",
+          "focusable");
 
   private final String svg;
   private final StringBuilder out;
@@ -153,7 +211,8 @@ final class SvgGate {
 
   private String name() {
     int start = at;
-    while (at < svg.length() && (Character.isLetterOrDigit(svg.charAt(at)) || svg.charAt(at) == '-')) {
+    while (at < svg.length()
+        && (Character.isLetterOrDigit(svg.charAt(at)) || svg.charAt(at) == '-')) {
       at++;
     }
     if (start == at) {

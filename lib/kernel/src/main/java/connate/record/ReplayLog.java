@@ -1,4 +1,4 @@
-package connate.log;
+package connate.record;
 
 import connate.protocol.Event;
 import connate.run.ReplayOutcome;
@@ -59,6 +59,17 @@ public final class ReplayLog implements ReplayWatcher {
   /** Returns the workbook. */
   public Workbook workbook() {
     return workbook;
+  }
+
+  /** Returns the title: the first heading of the first level in the prose, else the file name. */
+  public String title() {
+    return workbook.steps().stream()
+        .flatMap(step -> step.prose().lines())
+        .map(String::strip)
+        .filter(line -> line.startsWith("# "))
+        .map(line -> line.substring(2).strip())
+        .findFirst()
+        .orElse(workbook.name());
   }
 
   /** Returns the settings. */

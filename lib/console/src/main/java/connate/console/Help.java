@@ -1,0 +1,52 @@
+package connate.console;
+
+import java.util.Collection;
+import java.util.Comparator;
+
+/** The help of the whole program, and guesses for a word that was mistyped. */
+final class Help {
+
+  private static final int FAR = 3;
+
+  private Help() {}
+
+  static String text(Collection<String> commands) {
+    return String.join(
+        "\n",
+        "connate replay workbooks/tarn-hill/permeability.jsh",
+        "connate replay north.jsh --assume \"porosity cutoff=10 %\" --out north-10.html",
+        "",
+        "A scripting kernel for the permeability of rock. Commands:",
+        "  " + String.join(", ", commands),
+        "connate COMMAND --help tells what it takes.",
+        "",
+        "Exit: 0 done, 1 ran but failed or differs, 2 usage, 3 bad input data,",
+        "      4 refused by the guard, 70 our fault, 130 interrupted.");
+  }
+
+  static String near(String word, Collection<String> known) {
+    return known.stream()
+        .filter(k -> distance(word, k) <= FAR)
+        .min(Comparator.comparingInt(k -> distance(word, k)))
+        .map(k -> "; did you mean «" + k + "»?")
+        .orElse("");
+  }
+
+  /** The least number of letters to put in, take out or change. */
+  static int distance(String a, String b) {
+    int[] row = new int[b.length() + 1];
+    for (int j = 0; j <= b.length(); j++) {
+      row[j] = j;
+    }
+    for (int i = 1; i <= a.length(); i++) {
+      int diagonal = row[0];
+      row[0] = i;
+      for (int j = 1; j <= b.length(); j++) {
+        int change = diagonal + (a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1);
+        diagonal = row[j];
+        row[j] = Math.min(change, Math.min(row[j], row[j - 1]) + 1);
+      }
+    }
+    return row[b.length()];
+  }
+}

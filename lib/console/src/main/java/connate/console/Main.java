@@ -1,0 +1,52 @@
+package connate.console;
+
+import connate.record.Versions;
+import java.util.Arrays;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.concurrent.Callable;
+import java.util.function.Supplier;
+import picocli.CommandLine;
+
+/** Finds the command and runs it. Each command is loaded only when it is the one. */
+public final class Main {
+
+  private static final Map<String, Supplier<Callable<Integer>>> COMMANDS = commands();
+
+  private Main() {}
+
+  private static Map<String, Supplier<Callable<Integer>>> commands() {
+    Map<String, Supplier<Callable<Integer>>> commands = new LinkedHashMap<>();
+    commands.put("replay", ReplayCommand::new);
+    return commands;
+  }
+
+  /** Runs the command that the arguments name and ends with its exit status. */
+  public static void main(String... arguments) {
+    System.exit(run(arguments));
+  }
+
+  static int run(String... arguments) {
+    String first = arguments.length == 0 ? "--help" : arguments[0];
+    if (first.equals("--help") || first.equals("-h")) {
+      System.out.println(Help.text(COMMANDS.keySet()));
+      return Exit.DONE;
+    }
+    if (first.equals("--version")) {
+      System.out.println("connate " + Versions.connate());
+      return Exit.DONE;
+    }
+    Supplier<Callable<Integer>> command = COMMANDS.get(first);
+    if (command == null) {
+      System.err.println(
+          "connate: no command «" + first + "»" + Help.near(first, COMMANDS.keySet()));
+      System.err.println("connate --help lists them");
+      return Exit.USAGE;
+    }
+    String[] rest = Arrays.copyOfRange(arguments, 1, arguments.length);
+    CommandLine line = new CommandLine(command.get());
+    line.setExecutionExceptionHandler((e, l, parsed) -> Failures.tell(e, List.of(arguments)));
+    return line.execute(rest);
+  }
+}
