@@ -3,15 +3,14 @@ package connate.console;
 import connate.fault.DataException;
 import java.io.IOException;
 import java.io.UncheckedIOException;
-import java.util.List;
 
 /** Tells what went wrong in words and gives the exit status. */
 final class Failures {
 
   private Failures() {}
 
-  static int tell(Exception failure, List<String> arguments) {
-    if (arguments.contains("--debug")) {
+  static int tell(Exception failure, boolean debug) {
+    if (debug) {
       failure.printStackTrace();
     }
     if (failure instanceof DataException) {

@@ -44,9 +44,11 @@ public final class Main {
       System.err.println("connate --help lists them");
       return Exit.USAGE;
     }
-    String[] rest = Arrays.copyOfRange(arguments, 1, arguments.length);
+    boolean debug = List.of(arguments).contains("--debug");
+    String[] rest =
+        Arrays.stream(arguments).skip(1).filter(a -> !a.equals("--debug")).toArray(String[]::new);
     CommandLine line = new CommandLine(command.get());
-    line.setExecutionExceptionHandler((e, l, parsed) -> Failures.tell(e, List.of(arguments)));
+    line.setExecutionExceptionHandler((e, l, parsed) -> Failures.tell(e, debug));
     return line.execute(rest);
   }
 }

@@ -71,9 +71,6 @@ final class ReplayCommand implements Callable<Integer> {
       description = "print no cautions and no progress")
   private boolean quiet;
 
-  @Option(names = "--debug", hidden = true, description = "show stack traces")
-  private boolean debug;
-
   @Override
   public Integer call() throws IOException {
     Instant when = Instant.now();

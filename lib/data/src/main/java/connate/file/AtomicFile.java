@@ -29,7 +29,7 @@ public final class AtomicFile {
     Path target = path.toAbsolutePath();
     Path temporary = null;
     try {
-      temporary = Files.createTempFile(target.getParent(), ".connate-", ".part");
+      temporary = fresh(target);
       fill(temporary, content);
       move(temporary, target);
       temporary = null;
@@ -41,8 +41,15 @@ public final class AtomicFile {
     }
   }
 
+  /** A name of its own beside the target; its rights are those that any new file has. */
+  private static Path fresh(Path target) {
+    String name = "." + target.getFileName() + "-" + ProcessHandle.current().pid();
+    return target.resolveSibling(name + "-" + System.nanoTime() + ".part");
+  }
+
   private static void fill(Path temporary, byte[] content) throws IOException {
-    try (FileChannel channel = FileChannel.open(temporary, StandardOpenOption.WRITE)) {
+    try (FileChannel channel =
+        FileChannel.open(temporary, StandardOpenOption.CREATE_NEW, StandardOpenOption.WRITE)) {
       ByteBuffer buffer = ByteBuffer.wrap(content);
       while (buffer.hasRemaining()) {
         channel.write(buffer);

@@ -23,10 +23,10 @@ import java.util.List;
 public final class LogPage {
 
   /** Stands before the block that differs between runs. */
-  public static final String RUN_BEGINS = "<!-- run: this block differs between runs -->";
+  public static final String RUN_BEGINS = "<!-- run -->";
 
   /** Stands after the block that differs between runs. */
-  public static final String RUN_ENDS = "<!-- end of run -->";
+  public static final String RUN_ENDS = "<!-- /run -->";
 
   private static final String STYLE = style();
 

@@ -21,7 +21,7 @@ import java.util.Optional;
  * the workbook's text. Numbers stand at ten significant digits, so that the last bits of another
  * machine do not show.
  *
- * @param json the record as JSON in which no {@code <} stands
+ * @param json the record as JSON in which no sign of markup stands
  * @param pack the input files as JSON, empty where none were packed
  * @param workbookSha256 the digest of the workbook's bytes
  */
@@ -58,7 +58,7 @@ public record LogRecord(String json, Optional<String> pack, String workbookSha25
     } catch (IOException e) {
       throw new UncheckedIOException(e);
     }
-    return text.toString().replace("<", "\\u003c");
+    return text.toString().replace("<", "\\u003c").replace(">", "\\u003e").replace("&", "\\u0026");
   }
 
   private static void record(JsonGenerator out, ReplayLog log, byte[] workbook, String sha256)
