@@ -114,6 +114,20 @@ public final class Tops implements Listed {
         Series.of("depth", CurveUnits.depth(unit).orElse(well.depth().unit()), values));
   }
 
+  /** Returns the tops of several files together; a well that comes twice has the tops of both. */
+  public static Tops of(List<Tops> several) {
+    Map<String, List<Top>> byWell = new LinkedHashMap<>();
+    Map<String, String> spelling = new LinkedHashMap<>();
+    for (Tops some : several) {
+      some.spelling.forEach(spelling::putIfAbsent);
+      some.byWell.forEach(
+          (well, tops) -> byWell.computeIfAbsent(well, w -> new ArrayList<>()).addAll(tops));
+    }
+    byWell.forEach((well, tops) -> settle(spelling.get(well), tops));
+    tellOrder(byWell, spelling);
+    return new Tops(byWell, spelling);
+  }
+
   private static boolean isNone(double value) {
     boolean none = Double.isNaN(value);
     for (double mark : NONE) {
