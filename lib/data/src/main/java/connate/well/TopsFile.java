@@ -246,8 +246,14 @@ public final class TopsFile {
               Caution.of(
                   NEGATIVE,
                   file,
-                  file + ": " + section + " is " + Numbers.record(values[row]) + " at "
-                      + Numbers.record(depths[row]) + ", which cannot be: read as missing"));
+                  file
+                      + ": "
+                      + section
+                      + " is "
+                      + Numbers.record(values[row])
+                      + " at "
+                      + Numbers.record(depths[row])
+                      + ", which cannot be: read as missing"));
           values[row] = Double.NaN;
         }
       }

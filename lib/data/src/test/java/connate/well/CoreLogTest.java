@@ -22,10 +22,7 @@ class CoreLogTest {
 
   private static double[] column(List<String> lines, String name) {
     int at = List.of(lines.get(0).split(",")).indexOf(name);
-    return lines.stream()
-        .skip(1)
-        .mapToDouble(l -> number(l.split(",", -1)[at]))
-        .toArray();
+    return lines.stream().skip(1).mapToDouble(l -> number(l.split(",", -1)[at])).toArray();
   }
 
   private static double number(String cell) {

@@ -77,7 +77,8 @@ class TopsFileTest {
     TopsFile file = TopsFile.read(SharedFiles.of("usgs-sussex/4900524276.tops"));
     assertTrue(Double.isNaN(file.logs().get("Porosity").value(2)));
     assertTrue(
-        heard.stream().anyMatch(c -> c.code().equals("W43") && c.text().contains("-0.01 at 2490.22")));
+        heard.stream()
+            .anyMatch(c -> c.code().equals("W43") && c.text().contains("-0.01 at 2490.22")));
   }
 
   /** Independent: in every well porosity is between 0 and 30 % and the depths meet the tops. */
