@@ -2,6 +2,7 @@ package connate.engine;
 
 import connate.las.LasFile;
 import connate.series.Series;
+import connate.series.Unstated;
 import connate.well.Well;
 import java.util.ArrayList;
 import java.util.List;
@@ -14,11 +15,15 @@ final class Reading {
   static Well well(Inputs.Input input, Teller teller) {
     Well well = Well.of(LasFile.parse(input.name(), input.content()));
     List<String> mapping = new ArrayList<>();
-    mapping.add("well " + well.name() + ", depth in " + well.depth().unit().symbol());
+    mapping.add("well " + well.name() + ", depth" + in(well.depth()));
     for (Series curve : well.curves().values()) {
-      mapping.add(curve.name() + " in " + curve.unit().symbol());
+      mapping.add(curve.name() + in(curve));
     }
     input.told(teller, well.rows(), mapping);
     return well;
+  }
+
+  private static String in(Series series) {
+    return series.unit() == Unstated.UNIT ? ", no unit" : " in " + series.unit().symbol();
   }
 }

@@ -4,6 +4,7 @@ import connate.protocol.Request;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.regex.Pattern;
 
@@ -16,13 +17,18 @@ final class UserClasses extends ClassLoader {
 
   private final Map<String, byte[]> waiting = new ConcurrentHashMap<>();
 
+  private final Set<String> names = ConcurrentHashMap.newKeySet();
+
   UserClasses() {
     super("workbook", UserClasses.class.getClassLoader());
   }
 
   /** Takes classes, which are woven and defined when they are first needed. */
   void add(List<Request.Bytecode> classes) {
-    classes.forEach(c -> waiting.put(c.name(), c.bytes()));
+    for (Request.Bytecode loaded : classes) {
+      names.add(loaded.name());
+      waiting.put(loaded.name(), loaded.bytes());
+    }
   }
 
   @Override
@@ -37,7 +43,7 @@ final class UserClasses extends ClassLoader {
 
   /** Returns whether a class of that name is one of the user's. */
   boolean isUsers(String name) {
-    return findLoadedClass(name) != null || waiting.containsKey(name);
+    return names.contains(name);
   }
 
   /** Returns whether a class of the user's was compiled by the JDK's shell. */

@@ -450,12 +450,14 @@ final class Grammar {
 
   /** Returns the token after the bracket that closes the one at a token. */
   private int close(int from) {
-    Deque<String> open = new ArrayDeque<>();
+    Deque<Integer> open = new ArrayDeque<>();
     for (int at = from; at < tokens.size(); at++) {
       if (isOpening(at)) {
-        open.push(tokens.get(at).text());
+        open.push(at);
+      } else if (is(at, ";") && !mayHold(open.peek())) {
+        return OPEN;
       } else if (isClosing(at)) {
-        if (!fits(open.pop(), tokens.get(at).text())) {
+        if (!fits(tokens.get(open.pop()).text(), tokens.get(at).text())) {
           return STRAY;
         }
         if (open.isEmpty()) {
@@ -464,6 +466,11 @@ final class Grammar {
       }
     }
     return OPEN;
+  }
+
+  /** Returns whether a bracket may hold a semicolon: braces, the heads of loops and resources. */
+  private boolean mayHold(int bracket) {
+    return is(bracket, "{") || bracket > 0 && (is(bracket - 1, "for") || is(bracket - 1, "try"));
   }
 
   private static boolean fits(String opening, String closing) {
