@@ -59,7 +59,9 @@ public final class Complaint {
     if (code.startsWith("compiler.err.cant.resolve") && symbol.find()) {
       String kind = symbol.group(1).equals("class") ? "type" : symbol.group(1);
       Matcher where = WHERE.matcher(text);
-      boolean own = !where.find() || where.group(1).contains(Header.OWNER);
+      boolean own =
+          !where.find()
+              || where.group(1).matches("(class )?\\s*|.*(\\$Workbook|\\$JShell\\$|REPL).*");
       String owner = own ? "" : " in " + where.group(1).replaceFirst("^(class|interface) ", "");
       return "no " + kind + " «" + symbol.group(2).strip() + "» is known" + (own ? " here" : owner);
     }

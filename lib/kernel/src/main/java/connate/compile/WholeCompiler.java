@@ -79,15 +79,17 @@ public final class WholeCompiler {
     }
     References references = new References(pass);
     Forward forward = new Forward(code, references, pass, commands);
+    int runnable = commands.size();
     if (forward.command() != null) {
-      take(forward.problem(complaint), forward.command());
-      return null;
+      problem = forward.problem(complaint);
+      runnable = commands.indexOf(forward.command());
     }
     List<Request.Bytecode> classes = pass.generate();
     if (!pass.errors().isEmpty()) {
       return refused(pass, variables);
     }
-    return new Compilation(Header.OWNER, classes, entries(variables, references), problem, "");
+    List<Entry> entries = entries(variables, references).subList(0, runnable);
+    return new Compilation(Header.OWNER, classes, entries, problem, "");
   }
 
   private boolean lateImport() {
@@ -108,7 +110,8 @@ public final class WholeCompiler {
             || variables.values().stream()
                 .flatMap(List::stream)
                 .anyMatch(v -> !v.isVoid() && !v.broken() && !v.type().exact());
-    if (unsure) {
+    if (unsure || problem != null) {
+      // either not the user's error, or one that came only when what stands below was cut off
       return Compilation.commandByCommand("one class cannot hold all its commands");
     }
     cut(pass, pass.errors().get(0));

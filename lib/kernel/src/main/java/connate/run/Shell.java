@@ -10,6 +10,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.function.Consumer;
 import java.util.stream.Collectors;
+import jdk.jshell.DeclarationSnippet;
 import jdk.jshell.Diag;
 import jdk.jshell.ExpressionSnippet;
 import jdk.jshell.JShell;
@@ -27,6 +28,8 @@ import jdk.jshell.spi.ExecutionEnv;
  * where the last was.
  */
 public final class Shell implements AutoCloseable {
+
+  private static final String UNRESOLVED = "jdk.jshell.spi.SPIResolutionException";
 
   private final ShellControl control;
   private final JShell shell;
@@ -93,11 +96,28 @@ public final class Shell implements AutoCloseable {
       if (failed.kind().equals("refused")) {
         shell.drop(snippet);
       }
+      if (failed.type().equals(UNRESOLVED)) {
+        return new Result(unknown(), List.of(), List.of());
+      }
       boolean thrown = event.exception() != null;
       Event last = thrown ? frames.told(failed, event.exception().getStackTrace()) : failed;
       return new Result(last, List.of(), List.of());
     }
     return new Result(returned(event), List.of(), unresolved(event));
+  }
+
+  /** Returns what a call gives of a method that needs what is not there yet. */
+  private Event.Failed unknown() {
+    String names =
+        shell
+            .snippets()
+            .filter(s -> shell.status(s) == Snippet.Status.RECOVERABLE_DEFINED)
+            .flatMap(s -> shell.unresolvedDependencies((DeclarationSnippet) s))
+            .map(d -> "«" + d.replaceFirst("^\\S+ ", "") + "»")
+            .distinct()
+            .collect(Collectors.joining(", "));
+    String message = names + " is needed here, but stands only further down, or nowhere";
+    return new Event.Failed("compile", "", message, List.of(), false);
   }
 
   private Result rejected(Snippet snippet) {
@@ -142,7 +162,7 @@ public final class Shell implements AutoCloseable {
     boolean open =
         event.status() == Snippet.Status.RECOVERABLE_DEFINED
             || event.status() == Snippet.Status.RECOVERABLE_NOT_DEFINED;
-    return open && event.snippet() instanceof jdk.jshell.DeclarationSnippet declaration
+    return open && event.snippet() instanceof DeclarationSnippet declaration
         ? shell.unresolvedDependencies(declaration).toList()
         : List.of();
   }
