@@ -1,5 +1,6 @@
 package connate.engine;
 
+import connate.figure.Figure;
 import connate.protocol.Item;
 import connate.quantity.Numbers;
 import connate.quantity.Operand;
@@ -20,11 +21,29 @@ public final class Rendering {
   private static final int LONGEST = 20_000;
   private static final int MOST_ELEMENTS = 100;
   private static final int DEEPEST = 4;
+  private static final int SKETCH_COLUMNS = 72;
+  private static final int SKETCH_ROWS = 20;
 
   private Rendering() {}
 
-  /** Returns a value as an item. */
-  public static Item of(Object value) {
+  /**
+   * Returns a value as an item.
+   *
+   * @param id a name that no other figure of the log has: letters, digits, - and _
+   */
+  public static Item of(String id, Object value) {
+    if (value instanceof Figure figure) {
+      return new Item.Picture(
+          figure.svg(id),
+          figure.title(),
+          figure.description(),
+          figure.notes(),
+          figure.sketch(SKETCH_COLUMNS, SKETCH_ROWS));
+    }
+    return of(value);
+  }
+
+  private static Item of(Object value) {
     Optional<Item.Measure> measure =
         value instanceof Operand || value instanceof Number
             ? Measures.find(value)
@@ -44,13 +63,13 @@ public final class Rendering {
   }
 
   /** Returns several values as one item. */
-  public static Item together(Object... values) {
+  public static Item together(String id, Object... values) {
     if (values.length == 1) {
-      return of(values[0]);
+      return of(id, values[0]);
     }
     List<Item> items = new ArrayList<>();
     for (Object value : values) {
-      items.add(of(value));
+      items.add(of(id + (char) ('a' + items.size() % 26) + items.size() / 26, value));
     }
     return new Item.Group(items);
   }

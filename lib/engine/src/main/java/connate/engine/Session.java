@@ -26,6 +26,8 @@ final class Session {
   private Inputs inputs = new Inputs(Path.of("").toAbsolutePath(), null, false);
   private Assumptions assumptions;
   private long seed = 1;
+  private int running;
+  private int shown;
 
   Session(Teller teller) {
     this.teller = teller;
@@ -61,7 +63,7 @@ final class Session {
     try {
       var field = Class.forName(read.owner(), true, classes).getDeclaredField(read.field());
       field.setAccessible(true);
-      Item item = Rendering.of(field.get(null));
+      Item item = Rendering.of("v", field.get(null));
       text = item instanceof Item.Text plain ? plain.text() : item.toString();
     } catch (ReflectiveOperationException | LinkageError e) {
       text = "";
@@ -71,6 +73,8 @@ final class Session {
 
   /** Runs a command to its last event. */
   void invoke(Request.Invoke invoke) {
+    running = invoke.command();
+    shown = 0;
     teller.begin(invoke.command(), invoke.muted());
     Checkpoint.want(teller.isStopped());
     Event last;
@@ -92,7 +96,7 @@ final class Session {
     Method method = owner.getDeclaredMethod(invoke.method());
     method.setAccessible(true);
     Object value = method.invoke(null);
-    return method.getReturnType() == void.class ? null : Rendering.of(value);
+    return method.getReturnType() == void.class ? null : Rendering.of(nextId(), value);
   }
 
   private Event.Failed failure(Throwable thrown) {
@@ -101,6 +105,12 @@ final class Session {
     } catch (StackOverflowError | OutOfMemoryError e) {
       return new Event.Failed("memory", "", "no memory left", java.util.List.of(), false);
     }
+  }
+
+  /** Returns a name for the next figure, the same in every run. */
+  String nextId() {
+    shown++;
+    return "c" + running + "f" + shown;
   }
 
   void endPrinting() {

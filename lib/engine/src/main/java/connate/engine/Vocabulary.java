@@ -32,7 +32,8 @@ public final class Vocabulary {
   /** Puts values, tables and figures into the log; several stand together. */
   public static void show(Object... values) {
     Object[] all = values == null ? new Object[] {null} : values;
-    session().tell(new Event.Shown(Rendering.together(all)));
+    Session current = session();
+    current.tell(new Event.Shown(Rendering.together(current.nextId(), all)));
   }
 
   /** Keeps a result: it stands first in the log and is compared between replays. */
