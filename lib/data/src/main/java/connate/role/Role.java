@@ -14,14 +14,15 @@ import java.util.Optional;
  * @param unit the unit in which the range is meant, {@code null} for words and bare numbers
  * @param low the value below which a value deserves a look, NaN for none
  * @param high the value above which a value deserves a look, NaN for none
- * @param names the names, the most wanted first; a star at the end stands for letters and digits
+ * @param names the names, the most wanted first, without what does not matter; a star at the end
+ *     stands for letters and digits
  */
 public record Role(String name, Unit<?> unit, double low, double high, List<String> names) {
 
-  /** Copies the names. */
+  /** Takes from the names what does not matter. */
   public Role {
     Objects.requireNonNull(name, "name");
-    names = List.copyOf(names);
+    names = names.stream().map(Role::plain).toList();
   }
 
   /** Returns the same role with one more name, wanted before all others. */
@@ -51,8 +52,17 @@ public record Role(String name, Unit<?> unit, double low, double high, List<Stri
   }
 
   private static boolean fits(String key, String alias) {
-    String wanted = key(alias);
-    return alias.endsWith("*") ? key.startsWith(wanted) : key.equals(wanted);
+    int last = alias.length() - 1;
+    return alias.charAt(last) == '*'
+        ? key.regionMatches(0, alias, 0, last)
+        : key.equals(alias);
+  }
+
+  private static String plain(String name) {
+    if (key(name).isEmpty()) {
+      throw new IllegalArgumentException("«" + name + "» is no name of a column");
+    }
+    return key(name) + (name.strip().endsWith("*") ? "*" : "");
   }
 
   /** Returns the unit that a symbol means for this role, empty where it means none. */

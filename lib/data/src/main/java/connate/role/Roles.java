@@ -8,7 +8,6 @@ import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 
@@ -122,7 +121,7 @@ public final class Roles {
     double[] range = range(parts[2].strip());
     List<String> names = new ArrayList<>();
     for (String name : parts[3].split(",")) {
-      names.add(name.strip().toLowerCase(Locale.ROOT));
+      names.add(name.strip());
     }
     return new Role(parts[0].strip(), unitOf(unit), range[0], range[1], names);
   }

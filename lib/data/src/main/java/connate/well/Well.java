@@ -1,14 +1,11 @@
 package connate.well;
 
 import connate.fault.DataException;
-import connate.fault.Fault;
 import connate.las.HeaderLine;
 import connate.las.LasColumn;
-import connate.las.LasCurve;
 import connate.las.LasFile;
 import connate.las.LasOptions;
 import connate.las.LasWriter;
-import connate.las.Quirk;
 import connate.method.Caution;
 import connate.method.Listening;
 import connate.quantity.Length;
@@ -45,7 +42,7 @@ public final class Well implements Listed {
   private final DepthLine line;
   private final Map<String, WellCurve> curves;
 
-  private Well(
+  Well(
       String name, String source, LasFile file, Series depth, Map<String, WellCurve> curves) {
     this.name = Objects.requireNonNull(name, "name");
     this.source = source;
@@ -82,9 +79,7 @@ public final class Well implements Listed {
    * @throws DataException if its index is not a depth, or has no unit
    */
   public static Well of(LasFile file) {
-    LasCurve index = file.index();
-    String symbol = index.unit().isEmpty() ? startUnit(file) : index.unit();
-    return of(file, CurveUnits.depth(symbol).orElseThrow(() -> noDepth(file, index, symbol)));
+    return WellReader.of(file);
   }
 
   /**
@@ -94,57 +89,12 @@ public final class Well implements Listed {
    * @param depthUnit the unit of its index
    */
   public static Well of(LasFile file, Unit<?> depthUnit) {
-    for (Quirk quirk : file.quirks()) {
-      if (quirk.isCaution()) {
-        String place = quirk.line() == 0 ? "" : " line " + quirk.line();
-        Listening.caution(
-            Caution.of(quirk.code(), file.name(), file.name() + place + ": " + quirk.message()));
-      }
-    }
-    LasCurve index = file.index();
-    Series depth = Series.over(index.name(), depthUnit, index.values(), null);
-    String named = file.item("WELL").map(HeaderLine::value).orElse("");
-    String name = named.isEmpty() ? fileName(file) : named;
-    Well well = new Well(name, file.name(), file, depth, Map.of());
-    for (LasCurve curve : file.curves()) {
-      if (curve != index) {
-        well.curves.put(key(curve.name()), WellCurve.of(curve, well.depth));
-      }
-    }
-    return well;
-  }
-
-  private static DataException noDepth(LasFile file, LasCurve index, String symbol) {
-    HeaderLine line = index.header();
-    String words =
-        symbol.isEmpty()
-            ? "the index " + index.name() + " has no unit"
-            : "the index " + index.name() + " is in «" + symbol + "», which is no unit of depth";
-    return new DataException(
-        new Fault(
-            file.name(),
-            line.line(),
-            1,
-            1,
-            "W04",
-            words,
-            line.text().strip(),
-            "write M or FT behind its dot, or say it: Well.of(file, ft)"));
+    return WellReader.of(file, depthUnit);
   }
 
   /** Returns a well without logs yet, over depths that come from elsewhere. */
   public static Well of(String name, Series depth) {
     return new Well(name, "", null, depth, Map.of());
-  }
-
-  private static String startUnit(LasFile file) {
-    return file.item("STRT").map(HeaderLine::unit).orElse("");
-  }
-
-  private static String fileName(LasFile file) {
-    String name = Path.of(file.name()).getFileName().toString();
-    int dot = name.lastIndexOf('.');
-    return dot > 0 ? name.substring(0, dot) : name;
   }
 
   static String key(String name) {
@@ -242,6 +192,15 @@ public final class Well implements Listed {
     return all;
   }
 
+  /** Returns which curve stands for which role, as {@link #get} would find it. */
+  public Map<String, String> roles() {
+    Map<String, String> found = new LinkedHashMap<>();
+    for (Role role : Roles.all()) {
+      ranked(role).stream().findFirst().ifPresent(c -> found.put(role.name(), c.name()));
+    }
+    return found;
+  }
+
   /** Tells whether there is a curve of this mnemonic or role. */
   public boolean has(String nameOrRole) {
     return isDepth(nameOrRole) || find(nameOrRole).isPresent();
@@ -306,7 +265,8 @@ public final class Well implements Listed {
     return Roles.named(nameOrRole).flatMap(this::byRole);
   }
 
-  private Optional<WellCurve> byRole(Role role) {
+  /** Returns the curves of a role, the most wanted first. */
+  private List<WellCurve> ranked(Role role) {
     List<WellCurve> all = new ArrayList<>();
     for (WellCurve curve : curves.values()) {
       if (curve.role().filter(r -> r.name().equals(role.name())).isPresent()) {
@@ -314,6 +274,11 @@ public final class Well implements Listed {
       }
     }
     all.sort((a, b) -> Integer.compare(role.rank(a.mnemonic()), role.rank(b.mnemonic())));
+    return all;
+  }
+
+  private Optional<WellCurve> byRole(Role role) {
+    List<WellCurve> all = ranked(role);
     if (all.size() > 1) {
       Listening.caution(
           Caution.of(

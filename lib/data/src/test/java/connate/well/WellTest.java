@@ -133,6 +133,8 @@ class WellTest {
     assertThrows(IllegalArgumentException.class, () -> well.get("sonic"));
     Roles.add("sonic", "XYZ");
     assertEquals("XYZ", well.get("sonic").name());
+    assertEquals("XYZ", well.roles().get("sonic"));
+    assertEquals("GR", well.roles().get("gamma ray"));
     assertThrows(IllegalArgumentException.class, () -> Roles.add("colour", "XYZ"));
   }
 
