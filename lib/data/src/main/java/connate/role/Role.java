@@ -53,9 +53,7 @@ public record Role(String name, Unit<?> unit, double low, double high, List<Stri
 
   private static boolean fits(String key, String alias) {
     int last = alias.length() - 1;
-    return alias.charAt(last) == '*'
-        ? key.regionMatches(0, alias, 0, last)
-        : key.equals(alias);
+    return alias.charAt(last) == '*' ? key.regionMatches(0, alias, 0, last) : key.equals(alias);
   }
 
   private static String plain(String name) {

@@ -42,8 +42,7 @@ public final class Well implements Listed {
   private final DepthLine line;
   private final Map<String, WellCurve> curves;
 
-  Well(
-      String name, String source, LasFile file, Series depth, Map<String, WellCurve> curves) {
+  Well(String name, String source, LasFile file, Series depth, Map<String, WellCurve> curves) {
     this.name = Objects.requireNonNull(name, "name");
     this.source = source;
     this.file = file;
