@@ -10,8 +10,9 @@ import java.nio.charset.StandardCharsets;
 import java.util.Arrays;
 
 /**
- * The bytes of a file with their lines. A line ends at CR LF, LF or CR. One line feed is added
- * behind the last byte, so that a scan along a line needs no other bound.
+ * The bytes of a file with their lines. A line ends at CR LF, LF or CR. The byte behind the last one
+ * is a line feed, the file's own or one that is added, so that a scan along a line needs no other
+ * bound.
  */
 final class LasText {
 
@@ -55,6 +56,9 @@ final class LasText {
     }
     if (to < content.length) {
       quirks.note("L70", 0, "ends with " + (content.length - to) + " Ctrl-Z or NUL: left out");
+    }
+    if (to > from && content[to - 1] == '\n') {
+      return new LasText(file, content, from, to - 1);
     }
     byte[] padded = Arrays.copyOf(content, to + 1);
     padded[to] = '\n';

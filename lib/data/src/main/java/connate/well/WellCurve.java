@@ -72,7 +72,7 @@ final class WellCurve {
   Series series() {
     if (series == null) {
       Unit<?> unit = CurveUnits.of(symbol, role().orElse(null));
-      series = Series.over(name, unit, source.values(), depth);
+      series = new LasSeries(name, unit, source, depth);
     }
     return series;
   }

@@ -510,7 +510,7 @@ class LasCasesTest {
   void noDataSectionIsRefused() {
     Fault fault = refused(() -> text(VERSION + WELL + LasTextOf.CURVES));
     assertEquals("L04", fault.code());
-    assertEquals(14, fault.line());
+    assertEquals(13, fault.line());
   }
 
   @Test
