@@ -10,9 +10,9 @@ import java.nio.charset.StandardCharsets;
 import java.util.Arrays;
 
 /**
- * The bytes of a file with their lines. A line ends at CR LF, LF or CR. The byte behind the last one
- * is a line feed, the file's own or one that is added, so that a scan along a line needs no other
- * bound.
+ * The bytes of a file with their lines. A line ends at CR LF, LF or CR. The byte behind the last
+ * one is a line feed, the file's own or one that is added, so that a scan along a line needs no
+ * other bound.
  */
 final class LasText {
 

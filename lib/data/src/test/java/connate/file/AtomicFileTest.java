@@ -29,7 +29,9 @@ class AtomicFileTest {
     }
   }
 
-  /** A folder that holds something cannot be replaced by a file: the move fails, nothing is left. */
+  /**
+   * A folder that holds something cannot be replaced by a file: the move fails, nothing is left.
+   */
   @Test
   void failureLeavesTheOldAndNothingElse(@TempDir Path folder) throws IOException {
     Path taken = Files.createDirectories(folder.resolve("taken"));
