@@ -78,7 +78,8 @@ public final class Roles {
     for (Role role : all()) {
       int rank = role.rank(name);
       boolean isStarred = rank >= 0 && role.names().get(rank).endsWith("*");
-      int weight = rank < 0 ? -1 : isStarred ? rank + 1000 : rank;
+      // of two open names the longer says more: perm* before pe*
+      int weight = isStarred ? 1000 - role.names().get(rank).length() : rank;
       if (weight >= 0 && weight < bestRank && isAllowed(role, unit)) {
         best = role;
         bestRank = weight;

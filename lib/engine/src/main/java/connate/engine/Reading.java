@@ -3,6 +3,8 @@ package connate.engine;
 import connate.las.LasFile;
 import connate.series.Series;
 import connate.series.Unstated;
+import connate.table.Table;
+import connate.well.Tops;
 import connate.well.Well;
 import java.util.ArrayList;
 import java.util.List;
@@ -11,6 +13,25 @@ import java.util.List;
 final class Reading {
 
   private Reading() {}
+
+  static Table table(Inputs.Input input, String sheet, Teller teller) {
+    Table table = Table.read(input.name(), input.content(), sheet);
+    List<String> mapping = new ArrayList<>();
+    for (String name : table.names()) {
+      mapping.add(table.describe(name));
+    }
+    input.told(teller, table.rows(), mapping);
+    return table;
+  }
+
+  static Tops tops(Inputs.Input input, Teller teller) {
+    Table table = table(input, "", teller);
+    return Tops.of(table.labels("well"), table.labels("zone"), table.get(topColumn(table)));
+  }
+
+  private static String topColumn(Table table) {
+    return table.has("top") ? "top" : "depth";
+  }
 
   static Well well(Inputs.Input input, Teller teller) {
     Well well = Well.of(LasFile.parse(input.name(), input.content()));

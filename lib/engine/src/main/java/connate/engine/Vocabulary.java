@@ -6,6 +6,8 @@ import connate.protocol.Event;
 import connate.protocol.Item;
 import connate.quantity.Quantity;
 import connate.series.Estimate;
+import connate.table.Table;
+import connate.well.Tops;
 import connate.well.Well;
 import connate.well.Wells;
 import java.util.function.Function;
@@ -100,6 +102,21 @@ public final class Vocabulary {
 
   private static Item.Measure measure(Number number) {
     return Measures.find(number).orElseThrow();
+  }
+
+  /** Reads a table from a CSV or XLSX file. */
+  public static Table table(String file) {
+    return table(file, "");
+  }
+
+  /** Reads a table from a sheet of an XLSX file. */
+  public static Table table(String file, String sheet) {
+    return Reading.table(session().inputs().read(file), sheet, session().teller());
+  }
+
+  /** Reads the tops of zones from a table with the columns well, zone and top. */
+  public static Tops tops(String file) {
+    return Reading.tops(session().inputs().read(file), session().teller());
   }
 
   /** Reads a well from a LAS file. */

@@ -1,0 +1,351 @@
+package connate.table;
+
+import connate.fault.DataException;
+import connate.fault.Nearest;
+import connate.quantity.Unit;
+import connate.role.Role;
+import connate.role.Roles;
+import connate.series.Labels;
+import connate.series.Listed;
+import connate.series.Listing;
+import connate.series.Series;
+import connate.series.Unstated;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.stream.IntStream;
+
+/**
+ * A table: columns of numbers with units and columns of words, row by row, each row with the line
+ * of the file that it came from. A table does not change; {@link #with} and {@link #where} give
+ * another.
+ *
+ * <p>A column is asked for by its name or by its role ({@code get("porosity")}); if the table has a
+ * column of depth, its other columns know the depth of their rows.
+ *
+ * <p>The numbers stand in plain arrays; a Tablesaw table of them is made when {@link #tablesaw()}
+ * is asked, because the first touch of that library costs more than a small replay.
+ */
+public final class Table implements Listed {
+
+  private final String name;
+  private final List<Column> columns;
+  private final int[] lines;
+
+  private Table(String name, List<Column> columns, int[] lines) {
+    this.name = name;
+    this.columns = List.copyOf(columns);
+    this.lines = lines;
+  }
+
+  static Table of(String name, List<Column> columns, int[] lines) {
+    return new Table(name, columns, lines);
+  }
+
+  /**
+   * Reads a table from a file's bytes: CSV, or XLSX by its first sheet.
+   *
+   * @param file the file's name, for messages
+   * @param content its bytes
+   * @throws DataException if it is no table, with the places of what is wrong
+   */
+  public static Table read(String file, byte[] content) {
+    return read(file, content, "");
+  }
+
+  /** Reads a table from a sheet of an XLSX file. */
+  public static Table read(String file, byte[] content, String sheet) {
+    return TableReader.read(
+        XlsxSheet.isXlsx(content)
+            ? XlsxSheet.read(file, content, sheet)
+            : CsvSheet.read(file, content));
+  }
+
+  /** Returns a table of columns that were made elsewhere. */
+  public static Table of(String name, Series... series) {
+    List<Column> columns = new ArrayList<>();
+    for (Series one : series) {
+      if (one.size() != series[0].size()) {
+        throw new IllegalArgumentException(
+            "«"
+                + one.name()
+                + "» has "
+                + one.size()
+                + " rows, «"
+                + series[0].name()
+                + "» "
+                + series[0].size());
+      }
+      columns.add(Column.of(one));
+    }
+    return new Table(name, columns, new int[series.length == 0 ? 0 : series[0].size()]);
+  }
+
+  static String key(String name) {
+    return name.toLowerCase(Locale.ROOT).strip();
+  }
+
+  /** Returns the name, which is the file's. */
+  public String name() {
+    return name;
+  }
+
+  /** Returns the number of rows. */
+  public int rows() {
+    return lines.length;
+  }
+
+  /** Returns the names of the columns. */
+  public List<String> names() {
+    return columns.stream().map(Column::name).toList();
+  }
+
+  /**
+   * Returns the line of the file from which a row came, counted from 1; 0 where it came from none.
+   */
+  public int line(int row) {
+    return lines[row];
+  }
+
+  /** Returns whether there is a column of this name or role. */
+  public boolean has(String nameOrRole) {
+    return find(nameOrRole).isPresent();
+  }
+
+  /**
+   * Returns a column of numbers.
+   *
+   * @param nameOrRole the name, in capitals or not, or the role in plain words
+   * @throws IllegalArgumentException if there is none, or it holds words
+   */
+  public Series get(String nameOrRole) {
+    Column column = wanted(nameOrRole);
+    Series series =
+        column
+            .series()
+            .orElseThrow(
+                () ->
+                    new IllegalArgumentException(
+                        name
+                            + ": «"
+                            + column.name()
+                            + "» holds words: ask with labels(\""
+                            + column.name()
+                            + "\")"));
+    return depth().filter(d -> d != series).map(series::atDepth).orElse(series);
+  }
+
+  /**
+   * Returns a column of words.
+   *
+   * @throws IllegalArgumentException if there is none, or it holds numbers
+   */
+  public Labels labels(String nameOrRole) {
+    Column column = wanted(nameOrRole);
+    if (column.isNumeric()) {
+      throw new IllegalArgumentException(
+          name
+              + ": «"
+              + column.name()
+              + "» holds numbers: ask with get(\""
+              + column.name()
+              + "\")");
+    }
+    return column.words();
+  }
+
+  /** Returns the table with one more column, or with another in the place of the one so named. */
+  public Table with(String column, Series values) {
+    return with(Column.of(checked(column, values)));
+  }
+
+  /** Returns the table with one more column of words. */
+  public Table with(String column, Labels words) {
+    if (words.size() != rows()) {
+      throw new IllegalArgumentException(sizes(column, words.size()));
+    }
+    return with(Column.of(words).named(column));
+  }
+
+  private Series checked(String column, Series values) {
+    if (values.size() != rows()) {
+      throw new IllegalArgumentException(sizes(column, values.size()));
+    }
+    return values.named(column);
+  }
+
+  private String sizes(String column, int size) {
+    return name + " has " + rows() + " rows, «" + column + "» " + size;
+  }
+
+  private Table with(Column column) {
+    List<Column> next = new ArrayList<>(columns);
+    int at = indexOf(column.name());
+    if (at < 0) {
+      next.add(column);
+    } else {
+      next.set(at, column);
+    }
+    return new Table(name, next, lines);
+  }
+
+  /** States the unit of a column that came without one. */
+  public Table unit(String column, Unit<?> unit) {
+    Series series = get(column);
+    if (!series.unit().equals(Unstated.UNIT) && !series.unit().isSame(unit)) {
+      throw new IllegalArgumentException(
+          name
+              + ": «"
+              + series.name()
+              + "» is in "
+              + series.unit()
+              + " by its header, not in "
+              + unit
+              + "; to convert it say get(\""
+              + series.name()
+              + "\").to(…)");
+    }
+    return with(Column.of(series.as(unit)));
+  }
+
+  /** States the unit of a column by its symbol; the column's role decides where two share one. */
+  public Table unit(String column, String symbol) {
+    String found = get(column).name();
+    return unit(
+        column,
+        Heading.find(found, symbol)
+            .orElseThrow(
+                () ->
+                    new IllegalArgumentException(
+                        "«" + symbol + "» is no unit that is known for «" + found + "»")));
+  }
+
+  /** Returns the table with a column under another name. */
+  public Table rename(String column, String other) {
+    List<Column> next = new ArrayList<>(columns);
+    next.set(indexOf(wanted(column).name()), wanted(column).named(other));
+    return new Table(name, next, lines);
+  }
+
+  /** Returns the rows that bear a word. */
+  public Table where(String column, String word) {
+    int[] chosen = labels(column).rows(word);
+    if (chosen.length == 0) {
+      throw new IllegalArgumentException(
+          name
+              + ": no row has «"
+              + word
+              + "» in «"
+              + column
+              + "»; there are "
+              + String.join(", ", labels(column).distinct()));
+    }
+    return rows(chosen);
+  }
+
+  /** Returns the rows in which a column's number is present and passes a test, in its own unit. */
+  public Table where(String column, java.util.function.DoublePredicate test) {
+    Series series = get(column);
+    return rows(
+        IntStream.range(0, rows())
+            .filter(r -> !Double.isNaN(series.value(r)) && test.test(series.value(r)))
+            .toArray());
+  }
+
+  /** Returns the rows in which a column has a value. */
+  public Table present(String column) {
+    Column wanted = wanted(column);
+    return rows(IntStream.range(0, rows()).filter(r -> !wanted.isMissing(r)).toArray());
+  }
+
+  /** Returns the chosen rows, counted from 0, in the given order. */
+  public Table rows(int... chosen) {
+    return new Table(
+        name,
+        columns.stream().map(c -> c.rows(chosen)).toList(),
+        IntStream.of(chosen).map(r -> lines[r]).toArray());
+  }
+
+  /** Returns the rows by rising value of a column, missing ones last. */
+  public Table sortedBy(String column) {
+    Column wanted = wanted(column);
+    Comparator<Integer> order =
+        wanted.isNumeric()
+            ? Comparator.comparingDouble(r -> wanted.numbers().value(r))
+            : Comparator.comparing(
+                r -> wanted.words().label(r), Comparator.nullsLast(Comparator.naturalOrder()));
+    return rows(
+        IntStream.range(0, rows()).boxed().sorted(order).mapToInt(Integer::intValue).toArray());
+  }
+
+  /** Returns the table as CSV: units in the header, missing values empty, numbers in full. */
+  public String csv() {
+    return TableCsv.of(this);
+  }
+
+  /** Returns the same columns as a Tablesaw table; units and lines stay here. */
+  public tech.tablesaw.api.Table tablesaw() {
+    return TablesawView.of(this);
+  }
+
+  /** Returns what a column was read as, in a few words. */
+  public String describe(String column) {
+    Column found = wanted(column);
+    if (!found.isNumeric()) {
+      return found.name() + ": words";
+    }
+    Unit<?> unit = found.numbers().unit();
+    return found.name() + (unit.equals(Unstated.UNIT) ? ": numbers, no unit" : " in " + unit);
+  }
+
+  List<Column> columns() {
+    return columns;
+  }
+
+  private Column wanted(String nameOrRole) {
+    return find(nameOrRole)
+        .orElseThrow(
+            () ->
+                new IllegalArgumentException(
+                    name + " has no column " + Nearest.miss(nameOrRole, names())));
+  }
+
+  private Optional<Column> find(String nameOrRole) {
+    int at = indexOf(nameOrRole);
+    return at >= 0 ? Optional.of(columns.get(at)) : Roles.named(nameOrRole).flatMap(this::byRole);
+  }
+
+  private int indexOf(String wanted) {
+    for (int i = 0; i < columns.size(); i++) {
+      if (key(columns.get(i).name()).equals(key(wanted))) {
+        return i;
+      }
+    }
+    return -1;
+  }
+
+  private Optional<Column> byRole(Role role) {
+    return columns.stream()
+        .filter(c -> role.rank(c.name()) >= 0)
+        .min(Comparator.comparingInt(c -> role.rank(c.name())));
+  }
+
+  private Optional<Series> depth() {
+    return Roles.named("depth")
+        .flatMap(this::byRole)
+        .flatMap(Column::series)
+        .filter(d -> d.unit().dimension() == connate.quantity.Length.DIMENSION);
+  }
+
+  @Override
+  public Listing listing() {
+    return TableListing.of(this);
+  }
+
+  @Override
+  public String toString() {
+    return listing().toString();
+  }
+}
