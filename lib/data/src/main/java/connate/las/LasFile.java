@@ -132,9 +132,7 @@ public final class LasFile {
     return head.sections();
   }
 
-  /**
-   * Returns the header lines of the first section of a kind, none where there is no such section.
-   */
+  /** Returns the header lines of a kind of section, none where there is no such section. */
   public List<HeaderLine> items(LasSection.Kind kind) {
     return head.items(kind);
   }

@@ -11,13 +11,13 @@ record LasHead(LasVersion version, List<LasSection> sections, double nullValue) 
     sections = List.copyOf(sections);
   }
 
-  /** Returns the lines of the first section of a kind. */
+  /** Returns the lines of all sections of a kind; of curves only those of the first section. */
   List<HeaderLine> items(Kind kind) {
     return sections.stream()
         .filter(s -> s.kind() == kind)
-        .findFirst()
-        .map(LasSection::items)
-        .orElse(List.of());
+        .limit(kind == Kind.CURVE ? 1 : Long.MAX_VALUE)
+        .flatMap(s -> s.items().stream())
+        .toList();
   }
 
   /** Returns the first line of a name: of the well, else of the parameters, else of the version. */

@@ -86,10 +86,7 @@ final class OddLines {
         continue;
       }
       LooseNumber number = LooseNumber.of(decimalPoint(Items.bare(item)));
-      if (!number.isClear()
-          || c == 0
-              && number.kind() != LooseNumber.Kind.PLAIN
-              && number.kind() != LooseNumber.Kind.FORTRAN) {
+      if (!number.isClear()) {
         countText(line, places);
         notANumber(from, line, place, number, c, places.size());
         return;

@@ -94,7 +94,7 @@ final class RowScan {
     int at = start;
     for (int c = 0; c < cells.length; c++) {
       at = skipSpaces(at);
-      if (b[at] == delimiter && c > 0) {
+      if (b[at] == delimiter) {
         cells[c][row] = Double.NaN;
         odd.countEmpty();
       } else {

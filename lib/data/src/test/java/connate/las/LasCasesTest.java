@@ -802,6 +802,23 @@ class LasCasesTest {
   }
 
   @Test
+  void firstColumnThatIsNoIndexMayHaveWordsForNoValue() {
+    LasFile file = curves("~C\nGR.GAPI : g\nDEPT.M : d\n", "NaN 100\n60 100.5\n70 101\n");
+    assertColumn(file, "GR", NONE, 60, 70);
+    LasFile lost = rows("100 50 2.2\nNaN 60 2.3\n101 70 2.4\n");
+    assertColumn(lost, "GR", 50, 70);
+    assertTold(lost, "L40", 18);
+  }
+
+  @Test
+  void sectionsOfOneKindAreOne() {
+    LasFile file = text(VERSION + WELL + LasTextOf.CURVES + PARAMETERS + "~P\nTD.M 9 : t\n~A\n" + ROWS);
+    assertPlain(file);
+    assertEquals("8.5", file.item("BS").orElseThrow().value());
+    assertEquals("9", file.item("TD").orElseThrow().value());
+  }
+
+  @Test
   void curveSectionWithoutUnitTextAndLongLines() {
     assertEquals("", wellWith("X.Y:z").item("X").orElseThrow().value());
     String endless = VERSION + "~O\n" + "x".repeat(17 << 20) + "\n";
