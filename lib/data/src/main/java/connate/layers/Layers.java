@@ -13,6 +13,7 @@ import connate.quantity.Units;
 import connate.series.Estimate;
 import connate.series.Listed;
 import connate.series.Listing;
+import connate.table.Table;
 import connate.well.Tops;
 import connate.well.Well;
 import connate.well.Wells;
@@ -76,6 +77,11 @@ public final class Layers implements Listed {
       }
     }
     return of(layers);
+  }
+
+  /** Returns the zones of all wells that a table of tops knows, with the logs in them. */
+  public static Layers of(Wells wells, Table tops) {
+    return of(wells, Tops.of(tops));
   }
 
   /** Returns the layers. */

@@ -115,6 +115,15 @@ public final class Table implements Listed {
   }
 
   /**
+   * Returns whether a column holds numbers.
+   *
+   * @throws IllegalArgumentException if there is none
+   */
+  public boolean isNumeric(String nameOrRole) {
+    return wanted(nameOrRole).isNumeric();
+  }
+
+  /**
    * Returns a column of numbers.
    *
    * @param nameOrRole the name, in capitals or not, or the role in plain words

@@ -83,14 +83,14 @@ final class DepthLine {
     return step;
   }
 
-  /** Returns the least depth. */
-  double least() {
-    return rising.length == 0 ? Double.NaN : depths[rising[0]];
+  /** Returns the row of the least depth, -1 where there is none. */
+  int shallowest() {
+    return rising.length == 0 ? -1 : rising[0];
   }
 
-  /** Returns the greatest depth. */
-  double greatest() {
-    return rising.length == 0 ? Double.NaN : depths[rising[rising.length - 1]];
+  /** Returns the row of the greatest depth, -1 where there is none. */
+  int deepest() {
+    return rising.length == 0 ? -1 : rising[rising.length - 1];
   }
 
   /** Returns the rows from a depth on, to another one included or not, in their own order. */

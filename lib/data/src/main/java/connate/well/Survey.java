@@ -11,6 +11,7 @@ import connate.quantity.Units;
 import connate.series.Listed;
 import connate.series.Listing;
 import connate.series.Series;
+import connate.table.Table;
 
 /**
  * The path of a hole from a deviation survey, by minimum curvature: between two stations the hole
@@ -105,6 +106,11 @@ public final class Survey implements Listed {
   /** Returns the path of a survey that is given as logs with the roles inclination and azimuth. */
   public static Survey of(Well survey) {
     return of(survey.depth(), survey.get("inclination"), survey.get("azimuth"));
+  }
+
+  /** Returns the path of a survey that stands in a table with depth, inclination and azimuth. */
+  public static Survey of(Table survey) {
+    return of(survey.get("depth"), survey.get("inclination"), survey.get("azimuth"));
   }
 
   private static void check(Series depth, double[] md, double[] dips, double[] azimuths) {

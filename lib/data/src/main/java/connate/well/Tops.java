@@ -1,5 +1,6 @@
 package connate.well;
 
+import connate.fault.Nearest;
 import connate.las.LasSet;
 import connate.method.Caution;
 import connate.method.Listening;
@@ -10,6 +11,7 @@ import connate.series.Labels;
 import connate.series.Listed;
 import connate.series.Listing;
 import connate.series.Series;
+import connate.table.Table;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
@@ -64,7 +66,7 @@ public final class Tops implements Listed {
     Map<String, List<Top>> byWell = new LinkedHashMap<>();
     Map<String, String> spelling = new LinkedHashMap<>();
     List<String> absent = new ArrayList<>();
-    double[] metres = depths.in(Units.m);
+    Unit<Length> unit = lengthUnit(depths);
     for (int row = 0; row < depths.size(); row++) {
       String well = wells.label(row);
       String name = names.label(row);
@@ -76,13 +78,23 @@ public final class Tops implements Listed {
       if (isNone(depths.value(row))) {
         absent.add(name + " in " + well);
       } else {
-        tops.add(new Top(name, Units.m(metres[row]).to(lengthUnit(depths.unit()))));
+        tops.add(new Top(name, unit.of(depths.value(row))));
       }
     }
     tellAbsent(absent);
     byWell.forEach((well, tops) -> settle(spelling.get(well), tops));
     tellOrder(byWell, spelling);
     return new Tops(byWell, spelling);
+  }
+
+  /**
+   * Returns the tops of a table with the columns well, zone and top (or depth), one row for each.
+   *
+   * @throws IllegalArgumentException if a column is missing
+   */
+  public static Tops of(Table table) {
+    String depth = table.has("top") && table.isNumeric("top") ? "top" : "depth";
+    return of(table.labels("well"), table.labels("zone"), table.get(depth));
   }
 
   /**
@@ -136,8 +148,9 @@ public final class Tops implements Listed {
     return none;
   }
 
-  private static Unit<Length> lengthUnit(Unit<?> unit) {
-    return Length.DIMENSION.find(unit.symbol()).orElse(Units.m);
+  private static Unit<Length> lengthUnit(Series depths) {
+    depths.in(Units.m);
+    return Length.DIMENSION.find(depths.unit().symbol()).orElseThrow();
   }
 
   private static void settle(String well, List<Top> tops) {

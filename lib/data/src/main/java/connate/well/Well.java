@@ -1,6 +1,7 @@
 package connate.well;
 
 import connate.fault.DataException;
+import connate.fault.Nearest;
 import connate.las.HeaderLine;
 import connate.las.LasColumn;
 import connate.las.LasFile;
@@ -17,6 +18,7 @@ import connate.series.Labels;
 import connate.series.Listed;
 import connate.series.Listing;
 import connate.series.Series;
+import connate.table.Table;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -96,6 +98,20 @@ public final class Well implements Listed {
     return new Well(name, "", null, depth, Map.of());
   }
 
+  /**
+   * Returns a well whose logs stand in a table with a column of depth. Columns of words are left
+   * out.
+   */
+  public static Well of(String name, Table table) {
+    Well well = of(name, table.get("depth"));
+    for (String column : table.names()) {
+      if (table.isNumeric(column) && !column.equalsIgnoreCase(well.depth.name())) {
+        well.add(column, table.get(column));
+      }
+    }
+    return well;
+  }
+
   static String key(String name) {
     return name.toUpperCase(Locale.ROOT);
   }
@@ -126,7 +142,7 @@ public final class Well implements Listed {
    * @throws IllegalArgumentException if there is no row
    */
   public Length top() {
-    return Units.m(present(line.least())).to(lengthUnit());
+    return depthOf(line.shallowest());
   }
 
   /**
@@ -135,7 +151,7 @@ public final class Well implements Listed {
    * @throws IllegalArgumentException if there is no row
    */
   public Length base() {
-    return Units.m(present(line.greatest())).to(lengthUnit());
+    return depthOf(line.deepest());
   }
 
   /**
@@ -150,11 +166,11 @@ public final class Well implements Listed {
     return Units.m(line.step()).to(lengthUnit());
   }
 
-  private double present(double depthMetres) {
-    if (Double.isNaN(depthMetres)) {
+  private Length depthOf(int row) {
+    if (row < 0) {
       throw new IllegalArgumentException("well " + name + " has no row with a depth");
     }
-    return depthMetres;
+    return lengthUnit().of(depth.value(row));
   }
 
   boolean hasStep() {
@@ -189,6 +205,14 @@ public final class Well implements Listed {
       }
     }
     return all;
+  }
+
+  /** Returns depth and curves of numbers as a table. */
+  public Table table() {
+    List<Series> columns = new ArrayList<>();
+    columns.add(depth);
+    columns.addAll(curves().values());
+    return Table.of(name, columns.toArray(Series[]::new));
   }
 
   /** Returns which curve stands for which role, as {@link #get} would find it. */

@@ -2,6 +2,7 @@ package connate.well;
 
 import connate.fault.DataException;
 import connate.fault.Fault;
+import connate.fault.Nearest;
 import connate.method.Caution;
 import connate.method.Listening;
 import connate.series.Listed;

@@ -812,7 +812,8 @@ class LasCasesTest {
 
   @Test
   void sectionsOfOneKindAreOne() {
-    LasFile file = text(VERSION + WELL + LasTextOf.CURVES + PARAMETERS + "~P\nTD.M 9 : t\n~A\n" + ROWS);
+    LasFile file =
+        text(VERSION + WELL + LasTextOf.CURVES + PARAMETERS + "~P\nTD.M 9 : t\n~A\n" + ROWS);
     assertPlain(file);
     assertEquals("8.5", file.item("BS").orElseThrow().value());
     assertEquals("9", file.item("TD").orElseThrow().value());

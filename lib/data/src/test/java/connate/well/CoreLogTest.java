@@ -1,17 +1,14 @@
 package connate.well;
 
-import static connate.quantity.Units.fraction;
-import static connate.quantity.Units.gAPI;
-import static connate.quantity.Units.gPerCm3;
 import static connate.quantity.Units.m;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import connate.las.SharedFiles;
 import connate.series.Series;
+import connate.table.Table;
 import java.io.IOException;
 import java.nio.file.Files;
-import java.util.List;
 import org.junit.jupiter.api.Test;
 
 /**
@@ -20,27 +17,16 @@ import org.junit.jupiter.api.Test;
  */
 class CoreLogTest {
 
-  private static double[] column(List<String> lines, String name) {
-    int at = List.of(lines.get(0).split(",")).indexOf(name);
-    return lines.stream().skip(1).mapToDouble(l -> number(l.split(",", -1)[at])).toArray();
-  }
-
-  private static double number(String cell) {
-    return cell.isEmpty() ? Double.NaN : Double.parseDouble(cell);
+  private static Table table(String name) throws IOException {
+    return Table.read(name, Files.readAllBytes(SharedFiles.of("core-ast02/" + name)));
   }
 
   private static Well logs() throws IOException {
-    List<String> lines = Files.readAllLines(SharedFiles.of("core-ast02/well_logs_AST02.csv"));
-    return Well.of("AST-02", Series.of("depth", m, column(lines, "depth")))
-        .add("GR", Series.of("GR", gAPI, column(lines, "GR")))
-        .add("RHOB", Series.of("RHOB", gPerCm3, column(lines, "RHOB")));
+    return Well.of("AST-02", table("well_logs_AST02.csv").unit("depth", m));
   }
 
   private static Series porosity() throws IOException {
-    List<String> lines =
-        Files.readAllLines(SharedFiles.of("core-ast02/porperm_data_well_AST02.csv"));
-    Series depth = Series.of("depth", m, column(lines, "depth"));
-    return Series.of("porosity", fraction, column(lines, "porosity")).atDepth(depth);
+    return table("porperm_data_well_AST02.csv").unit("depth", m).get("porosity");
   }
 
   @Test

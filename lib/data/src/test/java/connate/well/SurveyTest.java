@@ -9,6 +9,8 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import connate.las.SharedFiles;
 import connate.series.Series;
+import connate.table.Table;
+import java.nio.charset.StandardCharsets;
 import org.junit.jupiter.api.Test;
 
 class SurveyTest {
@@ -90,6 +92,14 @@ class SurveyTest {
     assertEquals(500, survey.vertical(ft(500)).in(ft), 1e-9);
     assertEquals(ft, survey.vertical(ft(500)).unit());
     assertTrue(survey.toString().contains("survey of 2 stations"), survey.toString());
+  }
+
+  /** By hand: 60° all the way down. */
+  @Test
+  void surveyOfATable() {
+    String csv = "MD [ft],Incl [deg],Azim [deg]\n0,60,45\n1000,60,45\n";
+    Survey survey = Survey.of(Table.read("survey.csv", csv.getBytes(StandardCharsets.UTF_8)));
+    assertEquals(500, survey.vertical(ft(1000)).in(ft), 1e-9);
   }
 
   @Test

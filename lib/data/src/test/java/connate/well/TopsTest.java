@@ -15,6 +15,8 @@ import connate.method.Listening;
 import connate.method.MethodCard;
 import connate.series.Labels;
 import connate.series.Series;
+import connate.table.Table;
+import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
 import org.junit.jupiter.api.AfterEach;
@@ -142,6 +144,17 @@ class TopsTest {
             Wells.of(log("A", 80, 200), log("C", 80, 200)),
             tops("A", "Sand", 100, "A", "Shale", 120, "A", "Base", 150, "B", "Sand", 3));
     assertEquals(2, layers.layers().size());
+  }
+
+  /** By hand: rows of a table as a workbook reads it. */
+  @Test
+  void topsOfATable() {
+    String csv = "well,zone,top [ft]\nA,Sand,100\nA,Shale,\nA,Base,150\n";
+    Table table = Table.read("tops.csv", csv.getBytes(StandardCharsets.UTF_8));
+    Tops tops = Tops.of(table);
+    assertEquals(ft(150), tops.depth("A", "Base"));
+    assertEquals(List.of("W23"), heard);
+    assertEquals(1, Layers.of(Wells.of(log("A", 20, 60)), table).layers().size());
   }
 
   @Test

@@ -13,6 +13,7 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import connate.fault.DataException;
+import connate.fault.Nearest;
 import connate.las.LasFile;
 import connate.las.SharedFiles;
 import connate.method.Caution;
@@ -23,6 +24,7 @@ import connate.quantity.Fraction;
 import connate.role.Roles;
 import connate.series.Series;
 import connate.series.Unstated;
+import connate.table.Table;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -175,6 +177,17 @@ class WellTest {
     assertThrows(IllegalArgumentException.class, () -> well.add("X", moved));
   }
 
+  @Test
+  void wellsAndTablesTurnIntoEachOther() {
+    Table table = well().table();
+    assertEquals(List.of("DEPT", "GR", "RHOB", "NPHI", "XYZ"), table.names());
+    assertArrayEquals(well().get("RHOB").values(), table.get("bulk density").values());
+    Well back = Well.of("TH-9", table);
+    assertEquals(well().names(), back.names());
+    assertEquals(gPerCm3, back.get("RHOB").unit());
+    assertEquals(103, back.get("GR").depth().orElseThrow().value(6));
+  }
+
   /**
    * By hand: at 100.25 half between 10 and 20; at 101.5 GR lacks one sample, its neighbours are two
    * steps apart, so 40; RHOB lacks two samples, so its neighbours are three steps apart: missing.
@@ -210,6 +223,9 @@ class WellTest {
     assertArrayEquals(new double[] {100.5, 101}, in.depth().values());
     assertThrows(
         IllegalArgumentException.class, () -> well().in(new Zone("TH-8", "A", m(100.5), m(101.5))));
+    Well feet =
+        Well.of("F", Series.of("depth", ft, 79.1, 79.3, 79.7)).add("X", Series.of("x", gAPI, 1, 2, 3));
+    assertEquals(3, feet.between(feet.top(), feet.base()).rows());
     Well even = well().resample(m(0.25));
     assertEquals(13, even.rows());
     assertEquals(15, even.get("GR").value(1), 1e-12);
