@@ -224,7 +224,8 @@ class WellTest {
     assertThrows(
         IllegalArgumentException.class, () -> well().in(new Zone("TH-8", "A", m(100.5), m(101.5))));
     Well feet =
-        Well.of("F", Series.of("depth", ft, 79.1, 79.3, 79.7)).add("X", Series.of("x", gAPI, 1, 2, 3));
+        Well.of("F", Series.of("depth", ft, 79.1, 79.3, 79.7))
+            .add("X", Series.of("x", gAPI, 1, 2, 3));
     assertEquals(3, feet.between(feet.top(), feet.base()).rows());
     Well even = well().resample(m(0.25));
     assertEquals(13, even.rows());
