@@ -1,12 +1,12 @@
 package connate.figure;
 
-import connate.quantity.HydraulicConductivity;
 import connate.quantity.Length;
 import connate.quantity.Numbers;
-import connate.quantity.Permeability;
-import connate.quantity.Resistivity;
 import connate.quantity.Unit;
 import connate.series.Series;
+import connate.well.Tops;
+import connate.well.Well;
+import connate.well.Zone;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
@@ -25,27 +25,32 @@ public final class DepthPlot extends PlottedFigure {
   private static final int TRACK = 130;
   private static final int MOST_TRACKS = 8;
   private static final double NAME_WEIGHT = 0.62;
+  private static final int FEW = 5;
+  private static final List<String> USUAL =
+      List.of(
+          "gamma ray",
+          "deep resistivity",
+          "bulk density",
+          "neutron porosity",
+          "sonic",
+          "porosity",
+          "permeability");
 
+  private final Well well;
   private final String name;
   private final Unit<?> depthUnit;
   private final List<Track> tracks;
   private final List<Layer.Zone> zones;
   private final double[] between;
 
-  /** A log, which may be absent, with points over it. */
-  private record Track(Series log, List<Series> points, boolean onLog) {
-
-    Series first() {
-      return log == null ? points.get(0) : log;
-    }
-  }
-
   private DepthPlot(
+      Well well,
       String name,
       Unit<?> depthUnit,
       List<Track> tracks,
       List<Layer.Zone> zones,
       double[] between) {
+    this.well = well;
     this.name = name;
     this.depthUnit = depthUnit;
     this.tracks = List.copyOf(tracks);
@@ -54,16 +59,20 @@ public final class DepthPlot extends PlottedFigure {
   }
 
   static DepthPlot of(Series... logs) {
-    DepthPlot plot = new DepthPlot("", null, List.of(), List.of(), null);
+    DepthPlot plot = new DepthPlot(null, "", null, List.of(), List.of(), null);
     for (Series log : logs) {
       plot = plot.track(log);
     }
     return plot;
   }
 
-  /** Returns it under the name of a well. */
-  public DepthPlot named(String well) {
-    return new DepthPlot(well, depthUnit, tracks, zones, between);
+  static DepthPlot of(Well well) {
+    return new DepthPlot(well, well.name(), well.depth().unit(), List.of(), List.of(), null);
+  }
+
+  /** Returns it under another name. */
+  public DepthPlot named(String other) {
+    return new DepthPlot(well, other, depthUnit, tracks, zones, between);
   }
 
   /**
@@ -75,6 +84,28 @@ public final class DepthPlot extends PlottedFigure {
    */
   public DepthPlot track(Series log, Series... points) {
     return added(log, points);
+  }
+
+  /**
+   * Returns it with one more track: a curve of the well as a line, and what lies over it as points.
+   *
+   * @param curve the curve's mnemonic or role
+   * @param points columns that know their depth, such as core values
+   * @throws IllegalArgumentException if the plot is not of a well, or the well has no such curve
+   */
+  public DepthPlot track(String curve, Series... points) {
+    return added(needWell("a curve by its name").get(curve), points);
+  }
+
+  private Well needWell(String what) {
+    if (well == null) {
+      throw new IllegalArgumentException(
+          "this depth plot is not of a well, so it cannot find "
+              + what
+              + ": give a column, or"
+              + " start with depthPlot(well)");
+    }
+    return well;
   }
 
   /** Returns it with one more track that has points only. */
@@ -91,32 +122,15 @@ public final class DepthPlot extends PlottedFigure {
           "a depth plot has room for " + MOST_TRACKS + " tracks; draw a second one");
     }
     List<Track> all = new ArrayList<>(tracks);
-    Track track = new Track(log, List.of(points), isLog((log == null ? points[0] : log).unit()));
+    Track track =
+        new Track(log, List.of(points), Track.isLog((log == null ? points[0] : log).unit()));
     all.add(track);
-    Unit<?> unit = depthUnit == null ? depth(track.first()).unit() : depthUnit;
+    Unit<?> unit = depthUnit == null ? Track.depth(track.first()).unit() : depthUnit;
     for (Series series : points) {
-      depth(series);
+      Track.depth(series);
       Sampled.check(series.name(), track.first().name(), series.unit(), track.first().unit());
     }
-    return new DepthPlot(name, unit, all, zones, between);
-  }
-
-  private static boolean isLog(Unit<?> unit) {
-    return unit.dimension() == Permeability.DIMENSION
-        || unit.dimension() == HydraulicConductivity.DIMENSION
-        || unit.dimension() == Resistivity.DIMENSION;
-  }
-
-  private static Series depth(Series series) {
-    return series
-        .depth()
-        .orElseThrow(
-            () ->
-                new IllegalArgumentException(
-                    "«"
-                        + series.name()
-                        + "» does not know the depth of its rows: give it with"
-                        + " .atDepth(depth)"));
+    return new DepthPlot(well, name, unit, all, zones, between);
   }
 
   /** Returns it with the last track on a log axis. */
@@ -135,14 +149,28 @@ public final class DepthPlot extends PlottedFigure {
     }
     List<Track> all = new ArrayList<>(tracks);
     all.set(all.size() - 1, change.apply(all.get(all.size() - 1)));
-    return new DepthPlot(name, depthUnit, all, zones, between);
+    return new DepthPlot(well, name, depthUnit, all, zones, between);
   }
 
   /** Returns it with one more zone. */
   public DepthPlot zone(String zone, Length top, Length base) {
     List<Layer.Zone> all = new ArrayList<>(zones);
     all.add(new Layer.Zone(top.metres(), base.metres(), zone, all.size() % 2 == 0, false));
-    return new DepthPlot(name, depthUnit, tracks, all, between);
+    return new DepthPlot(well, name, depthUnit, tracks, all, between);
+  }
+
+  /** Returns it with zones, such as those of a well from its tops. */
+  public DepthPlot zones(Iterable<Zone> some) {
+    DepthPlot plot = this;
+    for (Zone zone : some) {
+      plot = plot.zone(zone.name(), zone.top(), zone.base());
+    }
+    return plot;
+  }
+
+  /** Returns it with the zones of its well. */
+  public DepthPlot zones(Tops tops) {
+    return zones(tops.zones(needWell("its zones")));
   }
 
   /** Returns only the part between two depths. */
@@ -151,13 +179,13 @@ public final class DepthPlot extends PlottedFigure {
       throw new IllegalArgumentException("the top at " + top + " is not above the base at " + base);
     }
     return new DepthPlot(
-        name, depthUnit, tracks, zones, new double[] {top.metres(), base.metres()});
+        well, name, depthUnit, tracks, zones, new double[] {top.metres(), base.metres()});
   }
 
   @Override
   Plot plot() {
     if (tracks.isEmpty()) {
-      throw new IllegalArgumentException("a depth plot needs a track: add one with .track(…)");
+      return usual().plot();
     }
     Axis depth = depthAxis();
     List<Panel> panels = new ArrayList<>();
@@ -170,7 +198,10 @@ public final class DepthPlot extends PlottedFigure {
     out.append(name.isEmpty() ? "" : " of " + name).append(", ");
     out.append(Wording.range(ends(depth), depthUnit)).append('.');
     for (Track track : tracks) {
-      panels.add(panel(track, depth, bands, notes, out));
+      TrackPanel drawn = TrackPanel.of(track, depth, depthUnit, bands);
+      panels.add(drawn.panel());
+      notes.addAll(drawn.notes());
+      out.append(' ').append(drawn.words()).append('.');
     }
     if (!bands.isEmpty()) {
       out.append(" Zones: ");
@@ -185,6 +216,28 @@ public final class DepthPlot extends PlottedFigure {
         note,
         Math.max(Plot.WIDTH, 120 + TRACK * panels.size()),
         HEIGHT);
+  }
+
+  /** Returns the curves that a well is usually looked at by, or else its first ones. */
+  private DepthPlot usual() {
+    if (well == null) {
+      throw new IllegalArgumentException("a depth plot needs a track: add one with .track(…)");
+    }
+    DepthPlot plot = this;
+    for (String role : USUAL) {
+      if (well.has(role) && well.get(role).count() > 0) {
+        plot = plot.track(role);
+      }
+    }
+    if (plot.tracks.isEmpty()) {
+      for (Series curve : well.curves().values()) {
+        plot = plot.tracks.size() < FEW && curve.count() > 0 ? plot.track(curve) : plot;
+      }
+    }
+    if (plot.tracks.isEmpty()) {
+      throw new IllegalArgumentException("well " + well.name() + " has no curve with a value");
+    }
+    return plot;
   }
 
   private static Axis names() {
@@ -227,7 +280,7 @@ public final class DepthPlot extends PlottedFigure {
   }
 
   private double[] depthsWithValue(Series series) {
-    double[] at = depth(series).in(depthUnit);
+    double[] at = Track.depth(series).in(depthUnit);
     double[] out = new double[at.length];
     int count = 0;
     for (int row = 0; row < at.length; row++) {
@@ -253,92 +306,6 @@ public final class DepthPlot extends PlottedFigure {
       }
     }
     return bands;
-  }
-
-  private Panel panel(
-      Track track, Axis depth, List<Layer.Zone> bands, List<String> notes, StringBuilder out) {
-    double[] ends = ends(depth);
-    List<Layer> layers = new ArrayList<>(bands);
-    List<double[]> drawn = new ArrayList<>();
-    Unit<?> unit = track.first().unit();
-    int look = 0;
-    if (track.log() != null) {
-      Cut cut = Cut.of(track.log(), unit, depthUnit, ends, track.onLog());
-      layers.add(new Layer.Stroke(cut.x(), cut.depth(), logLook(), Theme.LOG_LINE, ""));
-      drawn.add(cut.x());
-      notes.add(cut.note(track.log().name()));
-    }
-    for (Series points : track.points()) {
-      Cut cut = Cut.of(points, unit, depthUnit, ends, track.onLog());
-      String label =
-          track.log() == null ? "" : points.name() + " (points over " + track.log().name() + ")";
-      layers.add(new Layer.Dots(cut.x(), cut.depth(), pointLook(look++), Theme.POINT + 1, label));
-      drawn.add(cut.x());
-      notes.add(cut.note(points.name()));
-    }
-    double[][] columns = drawn.toArray(new double[0][]);
-    boolean empty = Arrays.stream(columns).flatMapToDouble(Arrays::stream).allMatch(Double::isNaN);
-    if (empty) {
-      throw new IllegalArgumentException(
-          "a track of «"
-              + track.first().name()
-              + "» has nothing to draw: "
-              + String.join("; ", notes.subList(notes.size() - columns.length, notes.size())));
-    }
-    String head = Wording.axis(Wording.quantity(track.first()), track.onLog());
-    out.append(' ').append(head).append(": ");
-    out.append(
-        Wording.range(Arrays.stream(columns).flatMapToDouble(Arrays::stream).toArray(), unit));
-    out.append('.');
-    return new Panel(Axis.of(head, Scale.around(track.onLog(), columns)), depth, layers, 1, true);
-  }
-
-  private static Look logLook() {
-    return new Look(Theme.LINES[0], Look.of(0).mark(), "", '*');
-  }
-
-  private static Look pointLook(int index) {
-    Look look = Look.of(index);
-    return new Look(Theme.LINES[2 - index % 3], look.mark(), "", look.letter());
-  }
-
-  /** The rows of a column inside the depths that are drawn; what cannot be drawn is NaN. */
-  private record Cut(double[] x, double[] depth, int n, int missing, int notPositive) {
-
-    static Cut of(Series series, Unit<?> unit, Unit<?> depthUnit, double[] ends, boolean log) {
-      double[] at = DepthPlot.depth(series).in(depthUnit);
-      double[] values = series.unit().equals(unit) ? series.values() : series.in(unit);
-      int count = 0;
-      int n = 0;
-      int missing = 0;
-      int low = 0;
-      for (int row = 0; row < at.length; row++) {
-        if (Double.isNaN(at[row]) || at[row] < ends[0] || at[row] > ends[1]) {
-          continue;
-        }
-        double value = values[row];
-        boolean absent = !Double.isFinite(value);
-        boolean below = !absent && log && value <= 0;
-        missing += absent ? 1 : 0;
-        low += below ? 1 : 0;
-        n += absent || below ? 0 : 1;
-        values[count] = absent || below ? Double.NaN : value;
-        at[count++] = at[row];
-      }
-      return new Cut(Arrays.copyOf(values, count), Arrays.copyOf(at, count), n, missing, low);
-    }
-
-    String note(String name) {
-      StringBuilder out = new StringBuilder(name).append(" n = ").append(n);
-      if (n < x.length) {
-        out.append(" of ").append(x.length).append(" (not drawn:");
-        out.append(missing > 0 ? " " + missing + " missing" : "");
-        out.append(missing > 0 && notPositive > 0 ? "," : "");
-        out.append(notPositive > 0 ? " " + notPositive + " zero or negative on a log axis" : "");
-        out.append(')');
-      }
-      return out.toString();
-    }
   }
 
   /** Returns what it is, with the number of tracks. */

@@ -8,6 +8,7 @@ import java.util.List;
 record LogScale(double low, double high) implements Scale {
 
   private static final double ROOM = 0.04;
+  private static final int SMALL_MARKS = 6;
   private static final int[][] INSIDE = {{1}, {1, 3}, {1, 2, 5}, {1, 2, 3, 4, 5, 6, 8}};
 
   static LogScale around(double[]... columns) {
@@ -83,7 +84,7 @@ record LogScale(double low, double high) implements Scale {
           boolean major = holds(inside, m) && Math.floorMod(exponent, every) == 0;
           if (major) {
             ticks.add(major(m, exponent, power));
-          } else if (last - first <= 8) {
+          } else if (last - first <= SMALL_MARKS) {
             ticks.add(Tick.of(value(m, exponent).doubleValue(), ""));
           }
         }

@@ -30,4 +30,19 @@ record Look(String colour, Mark mark, String dash, char letter) {
   Pen pen(double width) {
     return Pen.line(colour, width).dashed(dash);
   }
+
+  /** Returns the same with a whole line. */
+  Look whole() {
+    return new Look(colour, mark, "", letter);
+  }
+
+  /** Returns the same with a dashed line. */
+  Look dashed() {
+    return new Look(colour, mark, DASHES[1], letter);
+  }
+
+  /** Returns the same with round points. */
+  Look round() {
+    return new Look(colour, Mark.CIRCLE, dash, letter);
+  }
 }

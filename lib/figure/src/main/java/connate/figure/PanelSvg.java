@@ -34,7 +34,7 @@ final class PanelSvg {
 
   /** Returns the marks of the level axis, so few that their labels do not touch. */
   private List<Tick> roomy(Scale scale) {
-    for (int wanted = (int) Math.max(2, (x2 - x1) / TICK_ROOM); wanted > 1; wanted--) {
+    for (int wanted = (int) Math.max(4, (x2 - x1) / TICK_ROOM); wanted > 1; wanted--) {
       List<Tick> ticks = scale.ticks(wanted);
       if (fits(ticks)) {
         return ticks;

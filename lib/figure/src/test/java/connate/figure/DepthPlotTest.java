@@ -6,7 +6,10 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import connate.quantity.Units;
+import connate.series.Labels;
 import connate.series.Series;
+import connate.well.Tops;
+import connate.well.Well;
 import org.junit.jupiter.api.Test;
 
 class DepthPlotTest {
@@ -123,5 +126,41 @@ class DepthPlotTest {
     DepthPlot plot = depthPlot(phi, phi, phi, phi, Invented.permeability(20_000));
     int size = plot.svg("a").length();
     assertTrue(size < 400_000, "size " + size);
+  }
+
+  private static Well well() {
+    Series depth = Invented.depth(50, 2000, 0.5);
+    Well well = Well.of("TH-1", depth);
+    well.add("GR", Series.of("GR", Units.gAPI, Invented.uniform("g", 50, 20, 120, 2).values()));
+    well.add("PHI", Series.of("PHI", Units.fraction, Invented.porosity(50).values()));
+    return well;
+  }
+
+  @Test
+  void takesCurvesAndZonesFromAWell() {
+    Tops tops =
+        Tops.of(
+            Labels.of("well", "TH-1", "TH-1"),
+            Labels.of("top", "Upper", "Lower"),
+            Series.of("depth", Units.m, 2005, 2015));
+    Figure figure = depthPlot(well()).track("gr").track("PHI", Invented.porosity(9)).zones(tops);
+    assertEquals("TH-1: GR, PHI against depth", figure.title());
+    assertTrue(figure.description().contains("Zones: Upper, Lower."), figure.description());
+    SvgRules.check(figure);
+  }
+
+  @Test
+  void showsTheUsualCurvesWhereNoneIsAskedFor() {
+    assertEquals("TH-1: GR, PHI against depth", depthPlot(well()).title());
+  }
+
+  @Test
+  void saysWhatIsAskedOfNoWell() {
+    String message =
+        assertThrows(
+                IllegalArgumentException.class, () -> depthPlot(Invented.porosity(9)).track("GR"))
+            .getMessage();
+    assertTrue(message.contains("not of a well"), message);
+    assertThrows(IllegalArgumentException.class, () -> depthPlot(well()).track("RHOB"));
   }
 }
