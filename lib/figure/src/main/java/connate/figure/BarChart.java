@@ -33,7 +33,13 @@ public final class BarChart extends PlottedFigure {
   static BarChart of(Labels names, Series values) {
     if (names.size() != values.size()) {
       throw new IllegalArgumentException(
-          "«" + names.name() + "» has " + names.size() + " rows, «" + values.name() + "» "
+          "«"
+              + names.name()
+              + "» has "
+              + names.size()
+              + " rows, «"
+              + values.name()
+              + "» "
               + values.size());
     }
     if (names.size() > MOST) {
@@ -59,7 +65,13 @@ public final class BarChart extends PlottedFigure {
       Sampled.check(end.name(), "value", end.unit(), values.unit());
       if (end.size() != values.size()) {
         throw new IllegalArgumentException(
-            "«" + end.name() + "» has " + end.size() + " rows, «" + values.name() + "» "
+            "«"
+                + end.name()
+                + "» has "
+                + end.size()
+                + " rows, «"
+                + values.name()
+                + "» "
                 + values.size());
       }
     }
@@ -81,20 +93,22 @@ public final class BarChart extends PlottedFigure {
       at[i] = i;
       labels.add(names.label(row) == null ? "no name" : names.label(row));
     }
-    List<Layer> layers = new ArrayList<>();
-    layers.add(log ? new Layer.Dots(drawn, at, Look.of(1).round(), 8, "") : bars(drawn));
-    for (int i = 0; i < n; i++) {
-      if (ends[0].length > 0) {
-        double[] reach = {ends[0][i], ends[1][i]};
-        layers.add(new Layer.Stroke(reach, new double[] {i, i}, Look.of(0), 1.6, ""));
-      }
-    }
     Scale scale =
-        log ? LogScale.around(drawn, ends[0], ends[1])
+        log
+            ? LogScale.around(drawn, ends[0], ends[1])
             : LinearScale.fromZero(join(drawn, ends[0], ends[1]));
+    List<Layer> layers = new ArrayList<>();
+    for (int i = 0; i < ends[0].length; i++) {
+      double[] reach = {toEdge(ends[0][i], scale), toEdge(ends[1][i], scale)};
+      layers.add(new Layer.Stroke(reach, new double[] {i, i}, Look.of(0).letter('-'), 1.6, ""));
+    }
+    if (log) {
+      layers.add(new Layer.Dots(drawn, at, Look.of(1).round(), 8, ""));
+    } else {
+      layers.add(0, bars(drawn));
+    }
     String quantity = Wording.axis(Wording.quantity(values), log);
-    Panel panel =
-        Panel.of(Axis.of(quantity, scale), Axis.of("", new NameScale(labels)), layers);
+    Panel panel = Panel.of(Axis.of(quantity, scale), Axis.of("", new NameScale(labels)), layers);
     String note = rows.note();
     return new Plot(
         values.name() + " by " + names.name(),
@@ -105,7 +119,7 @@ public final class BarChart extends PlottedFigure {
         AROUND + ROW * n);
   }
 
-  /** Returns low and high ends from the lowest bar up; what a log axis cannot hold is missing. */
+  /** Returns low and high ends from the lowest bar up. */
   private double[][] ends(Rows rows) {
     if (low == null) {
       return new double[2][0];
@@ -114,11 +128,15 @@ public final class BarChart extends PlottedFigure {
     double[][] all = {low.in(values.unit()), high.in(values.unit())};
     for (int side = 0; side < 2; side++) {
       for (int i = 0; i < rows.n(); i++) {
-        double end = all[side][rows.kept()[rows.n() - 1 - i]];
-        out[side][i] = log && end <= 0 ? Double.NaN : end;
+        out[side][i] = all[side][rows.kept()[rows.n() - 1 - i]];
       }
     }
     return out;
+  }
+
+  /** Returns an end of a range; below all of a log axis where it is zero or negative. */
+  private double toEdge(double end, Scale scale) {
+    return log && end <= 0 ? scale.value(-0.1) : end;
   }
 
   private static double[] join(double[]... columns) {
@@ -133,7 +151,7 @@ public final class BarChart extends PlottedFigure {
       bottom[i] = i - 0.33;
       top[i] = i + 0.33;
     }
-    Look look = new Look(Theme.SKY, Look.of(0).mark(), "", '#');
+    Look look = new Look(Theme.SKY, Look.of(0).mark(), "", '█');
     return new Layer.Boxes(new double[n], drawn, bottom, top, look, 0.9, "");
   }
 
@@ -145,9 +163,23 @@ public final class BarChart extends PlottedFigure {
       least = drawn[i] < drawn[least] ? i : least;
     }
     String unit = values.unit().suffix();
-    return (log ? "Points" : "Bars") + " of " + quantity + " for each " + names.name()
-        + ". Largest: " + labels.get(most) + ", " + Numbers.text(drawn[most]) + unit
-        + "; smallest: " + labels.get(least) + ", " + Numbers.text(drawn[least]) + unit
-        + ". " + note + ".";
+    return (log ? "Points" : "Bars")
+        + " of "
+        + quantity
+        + " for each "
+        + names.name()
+        + ". Largest: "
+        + labels.get(most)
+        + ", "
+        + Numbers.text(drawn[most])
+        + unit
+        + "; smallest: "
+        + labels.get(least)
+        + ", "
+        + Numbers.text(drawn[least])
+        + unit
+        + ". "
+        + note
+        + ".";
   }
 }

@@ -100,7 +100,7 @@ record Bins(double[] edges, boolean log) {
   /** Returns filled bars. */
   Layer.Boxes boxes(double[] counts) {
     double[] zero = new double[size()];
-    Look look = new Look(Theme.SKY, Look.of(0).mark(), "", '#');
+    Look look = new Look(Theme.SKY, Look.of(0).mark(), "", '█');
     return new Layer.Boxes(
         Arrays.copyOf(edges, size()),
         Arrays.copyOfRange(edges, 1, size() + 1),

@@ -31,7 +31,13 @@ public final class BoxPlot extends PlottedFigure {
   static BoxPlot of(Series values, Labels groups) {
     if (groups.size() != values.size()) {
       throw new IllegalArgumentException(
-          "«" + groups.name() + "» has " + groups.size() + " rows, «" + values.name() + "» "
+          "«"
+              + groups.name()
+              + "» has "
+              + groups.size()
+              + " rows, «"
+              + values.name()
+              + "» "
               + values.size());
     }
     return new BoxPlot(values, groups, Crossplot.isLog(values.unit()));
@@ -137,10 +143,14 @@ public final class BoxPlot extends PlottedFigure {
 
   private static void draw(Five five, int at, List<Layer> layers) {
     Look black = Look.of(0);
-    Look sky = new Look(Theme.SKY, black.mark(), "", '#');
+    Look sky = new Look(Theme.SKY, black.mark(), "", '█');
     layers.add(
         new Layer.Stroke(
-            new double[] {five.low(), five.high()}, new double[] {at, at}, black, 1.2, ""));
+            new double[] {five.low(), five.high()},
+            new double[] {at, at},
+            black.letter('-'),
+            1.2,
+            ""));
     layers.add(
         new Layer.Boxes(
             new double[] {five.quarter()},
@@ -154,7 +164,7 @@ public final class BoxPlot extends PlottedFigure {
         new Layer.Stroke(
             new double[] {five.median(), five.median()},
             new double[] {at - 0.3, at + 0.3},
-            new Look(black.colour(), black.mark(), "", '|'),
+            black.letter('|'),
             2,
             ""));
     double[] places = new double[five.beyond().length];

@@ -18,14 +18,19 @@ import java.util.Locale;
  */
 public final class CurvePlot extends PlottedFigure {
 
-  private static final String NAME_FOR_MANY = " and others";
+  private static final int FEW = 3;
 
   private final Series x;
   private final List<Series> columns;
   private final Options options;
 
   private record Options(
-      boolean logX, boolean logY, boolean downwards, boolean points, List<Curve> lines) {}
+      boolean logX,
+      boolean logY,
+      boolean downwards,
+      boolean points,
+      String name,
+      List<Curve> lines) {}
 
   private CurvePlot(Series x, List<Series> columns, Options options) {
     this.x = x;
@@ -35,18 +40,25 @@ public final class CurvePlot extends PlottedFigure {
 
   static CurvePlot of(Series x, Series... columns) {
     if (columns.length == 0) {
-      throw new IllegalArgumentException("name at least one column to draw over «" + x.name() + "»");
+      throw new IllegalArgumentException(
+          "name at least one column to draw over «" + x.name() + "»");
     }
     for (Series column : columns) {
       Sampled.check(column.name(), "y", column.unit(), columns[0].unit());
       if (column.size() != x.size()) {
         throw new IllegalArgumentException(
-            "«" + column.name() + "» has " + column.size() + " rows, «" + x.name() + "» " + x.size());
+            "«"
+                + column.name()
+                + "» has "
+                + column.size()
+                + " rows, «"
+                + x.name()
+                + "» "
+                + x.size());
       }
     }
     boolean down = isDepth(x) && !isDepth(columns[0]);
-    Options usual =
-        new Options(isLog(x), isLog(columns[0]), down, false, List.of());
+    Options usual = new Options(isLog(x), isLog(columns[0]), down, false, "", List.of());
     return new CurvePlot(x, List.of(columns), usual);
   }
 
@@ -69,7 +81,8 @@ public final class CurvePlot extends PlottedFigure {
   }
 
   private CurvePlot with(boolean logX, boolean logY, boolean down, boolean points) {
-    return new CurvePlot(x, columns, new Options(logX, logY, down, points, options.lines()));
+    return new CurvePlot(
+        x, columns, new Options(logX, logY, down, points, options.name(), options.lines()));
   }
 
   /** Returns it with a log axis for the columns. */
@@ -107,6 +120,13 @@ public final class CurvePlot extends PlottedFigure {
     return with(options.logX(), options.logY(), options.downwards(), true);
   }
 
+  /** Returns it with a name for what all columns measure, such as {@code porosity}. */
+  public CurvePlot quantity(String name) {
+    Options o = options;
+    return new CurvePlot(
+        x, columns, new Options(o.logX(), o.logY(), o.downwards(), o.points(), name, o.lines()));
+  }
+
   /** Returns it with the line of a function. */
   public CurvePlot line(Curve curve) {
     Sampled.check(curve.label(), "common", curve.xUnit(), x.unit());
@@ -116,7 +136,13 @@ public final class CurvePlot extends PlottedFigure {
     return new CurvePlot(
         x,
         columns,
-        new Options(options.logX(), options.logY(), options.downwards(), options.points(), all));
+        new Options(
+            options.logX(),
+            options.logY(),
+            options.downwards(),
+            options.points(),
+            options.name(),
+            all));
   }
 
   @Override
@@ -137,8 +163,11 @@ public final class CurvePlot extends PlottedFigure {
     Axis other = other(drawnY.toArray(new double[0][]));
     List<Layer> layers = layers(xs, ys);
     lines(common, layers);
-    Panel panel = Panel.of(options.downwards() ? other : common, options.downwards() ? common : other, layers);
-    return Plot.of(title(), describe(drawnX, drawnY, notes), panel, List.of(String.join("; ", notes)));
+    Panel panel =
+        Panel.of(
+            options.downwards() ? other : common, options.downwards() ? common : other, layers);
+    return Plot.of(
+        heading(), describe(drawnX, drawnY, notes), panel, List.of(String.join("; ", notes)));
   }
 
   private Axis common(double[][] drawn) {
@@ -154,13 +183,14 @@ public final class CurvePlot extends PlottedFigure {
     return new Axis(title, Scale.around(log, drawn), isDepth(first) && !options.downwards());
   }
 
-  /** Returns one name for all columns: their dimension, where there are several. */
+  /** Returns one name for all columns: the given one, or theirs, or their dimension. */
   private String quantityName() {
-    Series first = columns.get(0);
-    if (columns.size() == 1) {
-      return first.name();
+    if (!options.name().isEmpty()) {
+      return options.name();
     }
-    return first.isPure() ? first.name() + NAME_FOR_MANY : first.unit().dimension().name();
+    return columns.size() <= FEW
+        ? Wording.list(columns.stream().map(Series::name).toList())
+        : columns.get(0).unit().dimension().name();
   }
 
   private List<Layer> layers(double[] xs, List<double[]> ys) {
@@ -196,7 +226,7 @@ public final class CurvePlot extends PlottedFigure {
     return options.downwards() ? second : first;
   }
 
-  private String title() {
+  private String heading() {
     return Wording.list(columns.stream().map(Series::name).toList()) + " against " + x.name();
   }
 

@@ -69,10 +69,10 @@ record LinearScale(double low, double high) implements Scale {
     double mantissa = least / StrictMath.pow(10, exponent);
     for (double step : STEPS) {
       if (step >= mantissa * (1 - 1e-9)) {
-        return BigDecimal.valueOf((long) step).scaleByPowerOfTen(exponent);
+        return BigDecimal.valueOf((long) step).scaleByPowerOfTen(exponent).stripTrailingZeros();
       }
     }
-    return BigDecimal.TEN.scaleByPowerOfTen(exponent);
+    return BigDecimal.ONE.scaleByPowerOfTen(exponent + 1);
   }
 
   private static String words(BigDecimal at) {

@@ -36,9 +36,9 @@ record Look(String colour, Mark mark, String dash, char letter) {
     return new Look(colour, mark, "", letter);
   }
 
-  /** Returns the same with a dashed line. */
-  Look dashed() {
-    return new Look(colour, mark, DASHES[1], letter);
+  /** Returns the same with another character in a sketch. */
+  Look letter(char other) {
+    return new Look(colour, mark, dash, other);
   }
 
   /** Returns the same with round points. */

@@ -27,7 +27,13 @@ public final class LorenzPlot extends PlottedFigure {
     double[] ends = {0, 1};
     List<Layer> layers = new ArrayList<>();
     layers.add(new Layer.Ribbon(storage, storage, flow, Look.of(1), ""));
-    layers.add(new Layer.Stroke(ends, ends, Look.of(0).dashed(), 1.2, "uniform rock"));
+    layers.add(
+        new Layer.Stroke(
+            ends,
+            ends,
+            new Look(Theme.LINES[0], Look.of(0).mark(), "7 3", '·'),
+            1.2,
+            "uniform rock"));
     String label = lorenz.isByDepth() ? "layers from the top down" : "layers, fastest first";
     layers.add(new Layer.Stroke(storage, flow, Look.of(1).whole(), Theme.LINE, label));
     if (storage.length <= MOST_POINTS) {
@@ -41,7 +47,9 @@ public final class LorenzPlot extends PlottedFigure {
             layers);
     int n = storage.length - 1;
     String note =
-        "n = " + Wording.count(n, "layer") + "; Lorenz coefficient "
+        "n = "
+            + Wording.count(n, "layer")
+            + "; Lorenz coefficient "
             + Numbers.text(StrictMath.rint(lorenz.coefficient().value() * 1000) / 1000);
     String words =
         "Lorenz plot: cumulative flow capacity over cumulative storage capacity, each from 0 to 1. "

@@ -10,6 +10,7 @@ final class PlotSketch {
   private static final int LEAST_COLUMNS = 30;
   private static final int LEAST_ROWS = 8;
   private static final int WIDEST_LABEL = 14;
+  private static final double MOST_CELLS = 10_000;
 
   private final Plot plot;
   private final char[][] grid;
@@ -69,13 +70,9 @@ final class PlotSketch {
       return dots.look().letter();
     }
     if (layer instanceof Layer.Stroke stroke) {
-      return strokeLetter(stroke.look());
+      return stroke.look().letter();
     }
-    return layer instanceof Layer.Boxes ? '█' : '|';
-  }
-
-  private static char strokeLetter(Look look) {
-    return Character.isLetter(look.letter()) ? '·' : look.letter();
+    return layer instanceof Layer.Boxes boxes ? boxes.look().letter() : '|';
   }
 
   private int labelWidth() {
@@ -177,14 +174,23 @@ final class PlotSketch {
     }
   }
 
+  /** Draws a line cell by cell, so that it is straight where the axes make it so. */
   private void stroke(Panel panel, Layer.Stroke stroke, int first, int last) {
-    char c = strokeLetter(stroke.look());
-    for (int i = 1; i < stroke.x().length; i++) {
-      for (int part = 0; part <= 4; part++) {
-        double t = part / 4.0;
-        double x = stroke.x()[i - 1] + t * (stroke.x()[i] - stroke.x()[i - 1]);
-        double y = stroke.y()[i - 1] + t * (stroke.y()[i] - stroke.y()[i - 1]);
-        mark(panel, x, y, first, last, c);
+    double[] x = panel.x().at(stroke.x(), first, last);
+    double[] y = panel.y().at(stroke.y(), bottom - 1.0, top);
+    for (int i = 1; i < x.length; i++) {
+      double longest = Math.max(Math.abs(x[i] - x[i - 1]), Math.abs(y[i] - y[i - 1]));
+      if (!(longest < MOST_CELLS)) {
+        continue;
+      }
+      int steps = (int) Math.max(1, Math.ceil(longest));
+      for (int step = 0; step <= steps; step++) {
+        double t = step / (double) steps;
+        long column = Math.round(x[i - 1] + t * (x[i] - x[i - 1]));
+        long row = Math.round(y[i - 1] + t * (y[i] - y[i - 1]));
+        if (column >= first && column <= last && row >= top && row < bottom) {
+          put((int) row, (int) column, stroke.look().letter());
+        }
       }
     }
   }
@@ -201,7 +207,7 @@ final class PlotSketch {
     int b = Math.max(a, column(Math.max(from, to), first, last) - 1);
     for (int row = Math.min(low, high); row <= Math.max(low, high); row++) {
       for (int column = Math.max(first, a); column <= Math.min(last, b); column++) {
-        put(row, column, '█');
+        put(row, column, boxes.look().letter());
       }
     }
   }
@@ -226,7 +232,7 @@ final class PlotSketch {
   }
 
   private int row(double at) {
-    return bottom - 1 - (int) Math.round(at * (bottom - 1 - top));
+    return (int) Math.round(bottom - 1 - at * (bottom - 1 - top));
   }
 
   private void put(int row, int column, char c) {

@@ -49,7 +49,13 @@ public final class ProbabilityPlot extends PlottedFigure {
   public ProbabilityPlot byGroup(Labels words) {
     if (words.size() != values.size()) {
       throw new IllegalArgumentException(
-          "«" + words.name() + "» has " + words.size() + " rows, «" + values.name() + "» "
+          "«"
+              + words.name()
+              + "» has "
+              + words.size()
+              + " rows, «"
+              + values.name()
+              + "» "
               + values.size());
     }
     return new ProbabilityPlot(values, log, words, law);
@@ -64,8 +70,7 @@ public final class ProbabilityPlot extends PlottedFigure {
   Plot plot() {
     double[] all = values.values();
     Rows rows =
-        Rows.of(new boolean[] {log}, all)
-            .needing("a probability plot", "«" + values.name() + "»");
+        Rows.of(new boolean[] {log}, all).needing("a probability plot", "«" + values.name() + "»");
     double[] drawn = rows.of(all);
     List<Layer> layers = new ArrayList<>();
     List<String> notes = new ArrayList<>();
@@ -116,7 +121,7 @@ public final class ProbabilityPlot extends PlottedFigure {
         log ? Distributions.lognormal(StrictMath.exp(mean), sd) : Distributions.normal(mean, sd);
     double[] ends = {percent.low(), percent.high()};
     double[] y = {fitted.quantile(ends[0] / 100), fitted.quantile(ends[1] / 100)};
-    layers.add(new Layer.Stroke(ends, y, Look.of(2), Theme.LINE, fitted.words()));
+    layers.add(new Layer.Stroke(ends, y, Look.of(2).whole(), Theme.LINE, fitted.words()));
     return " Line: " + fitted.words() + ".";
   }
 

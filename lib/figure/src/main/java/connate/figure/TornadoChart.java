@@ -54,12 +54,11 @@ public final class TornadoChart extends PlottedFigure {
     checkLog(low, high, base);
     Scale scale = Scale.around(log, low, high, new double[] {base});
     List<Layer> layers = new ArrayList<>();
-    layers.add(bars(base, low, Theme.SKY, "input at the value that 90 % exceed", 'o'));
-    layers.add(bars(base, high, Theme.ORANGE, "input at the value that 10 % exceed", 'x'));
+    layers.add(bars(base, low, Theme.SKY, "input at the value that 90 % exceed", '▒'));
+    layers.add(bars(base, high, Theme.ORANGE, "input at the value that 10 % exceed", '█'));
     layers.add(new Layer.Rule(base, true, Look.of(0), ""));
     String quantity = Wording.axis(Wording.quantity(tornado.result(), unit), log);
-    Panel panel =
-        Panel.of(Axis.of(quantity, scale), Axis.of("", new NameScale(names)), layers);
+    Panel panel = Panel.of(Axis.of(quantity, scale), Axis.of("", new NameScale(names)), layers);
     String note = tornado.base() + " with all inputs at their medians (upright line)";
     return new Plot(
         "What moves " + tornado.result(),
@@ -74,7 +73,9 @@ public final class TornadoChart extends PlottedFigure {
     for (int i = 0; log && i < low.length; i++) {
       if (!(low[i] > 0 && high[i] > 0 && base > 0)) {
         throw new IllegalArgumentException(
-            "«" + tornado.result() + "» has a bar that ends at or below 0, which no log axis holds:"
+            "«"
+                + tornado.result()
+                + "» has a bar that ends at or below 0, which no log axis holds:"
                 + " draw it on an even axis");
       }
     }

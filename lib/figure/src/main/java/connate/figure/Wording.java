@@ -5,6 +5,7 @@ import connate.quantity.Fraction;
 import connate.quantity.Length;
 import connate.quantity.Numbers;
 import connate.quantity.Ratio;
+import connate.quantity.Time;
 import connate.quantity.Unit;
 import connate.series.Series;
 import connate.series.Unstated;
@@ -47,6 +48,7 @@ final class Wording {
     return dimension == Fraction.DIMENSION
         || dimension == Ratio.DIMENSION
         || dimension == Length.DIMENSION
+        || dimension == Time.DIMENSION
         || name.toLowerCase(Locale.ROOT).contains(dimension.name().toLowerCase(Locale.ROOT));
   }
 

@@ -1,18 +1,25 @@
 package connate.figure;
 
+import static connate.figure.Figures.bars;
+import static connate.figure.Figures.boxes;
 import static connate.figure.Figures.crossplot;
+import static connate.figure.Figures.curves;
 import static connate.figure.Figures.depthPlot;
 import static connate.figure.Figures.histogram;
+import static connate.figure.Figures.probabilityPlot;
+import static connate.figure.Figures.tornado;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import connate.chance.Tornado;
 import connate.quantity.Unit;
 import connate.quantity.Units;
 import connate.series.Band;
 import connate.series.Curve;
 import connate.series.Labels;
 import connate.series.Series;
+import java.util.List;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
@@ -46,6 +53,23 @@ class HostileNamesTest {
     }
   }
 
+  private record Share(String label) implements Curve {
+    @Override
+    public double y(double x) {
+      return x;
+    }
+
+    @Override
+    public Unit<?> xUnit() {
+      return Units.fraction;
+    }
+
+    @Override
+    public Unit<?> yUnit() {
+      return Units.fraction;
+    }
+  }
+
   @ParameterizedTest
   @ValueSource(
       strings = {
@@ -69,7 +93,16 @@ class HostileNamesTest {
     Named line = new Named(name);
     check(crossplot(x, y).byGroup(groups).line(line).band(line));
     check(histogram(y).byGroup(groups).lognormal());
+    check(curves(x, x.named(name)).line(new Share(name)));
+    check(probabilityPlot(y).byGroup(groups).law());
+    check(boxes(y, groups));
+    check(bars(groups, y));
+    check(tornado(new Tornado(name, Units.mD(2), List.of(bar(name)))));
     check(depthPlot(x).named(name).track(y, y).zone(name, Units.m(2001), Units.m(2008)));
+  }
+
+  private static Tornado.Bar bar(String name) {
+    return new Tornado.Bar(name, Units.mD(1), Units.mD(3));
   }
 
   private static void check(Figure figure) {

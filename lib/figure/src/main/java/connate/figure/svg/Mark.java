@@ -1,8 +1,11 @@
 package connate.figure.svg;
 
-/** The shape of a point. */
+/**
+ * The shape of a point. Circles are strokes of no length with round ends; squares are not, since
+ * printed pages leave out strokes of no length with square ends.
+ */
 public enum Mark {
-  /** A filled circle. */
+  /** A filled circle: eight characters or so for each. */
   CIRCLE,
   /** A filled square. */
   SQUARE,
@@ -15,19 +18,13 @@ public enum Mark {
   /** A slanting cross. */
   CROSS;
 
-  /** Returns whether the shape is drawn with the pen's stroke rather than filled. */
-  boolean isStroked() {
-    return this == CIRCLE || this == SQUARE || this == PLUS || this == CROSS;
-  }
-
   /** Returns the attributes with which its path is drawn. */
   String attributes(String colour, double size, double opacity) {
     String clear = opacity < 1 ? " opacity=\"" + Pen.decimal(opacity) + "\"" : "";
     return switch (this) {
       case CIRCLE -> stroke(colour, size) + " stroke-linecap=\"round\"" + clear;
-      case SQUARE -> stroke(colour, size * 0.9) + " stroke-linecap=\"square\"" + clear;
       case PLUS, CROSS -> stroke(colour, 1.4) + clear;
-      case TRIANGLE, DIAMOND -> "fill=\"" + colour + "\"" + clear;
+      case SQUARE, TRIANGLE, DIAMOND -> "fill=\"" + colour + "\"" + clear;
     };
   }
 
@@ -39,9 +36,16 @@ public enum Mark {
   void draw(PathData path, double x, double y, double size) {
     double r = size / 2;
     switch (this) {
-      case CIRCLE, SQUARE -> {
+      case CIRCLE -> {
         path.move(x, y);
         path.dot();
+      }
+      case SQUARE -> {
+        path.move(x - r * 0.9, y - r * 0.9);
+        path.by(r * 1.8, 0);
+        path.by(0, r * 1.8);
+        path.by(-r * 1.8, 0);
+        path.close();
       }
       case TRIANGLE -> {
         path.move(x, y - r * 1.2);
