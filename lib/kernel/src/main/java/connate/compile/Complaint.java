@@ -1,6 +1,7 @@
 package connate.compile;
 
 import connate.fault.Fault;
+import connate.guard.Refusal;
 import connate.workbook.Command;
 import connate.workbook.Workbook;
 import java.util.List;
@@ -45,13 +46,23 @@ public final class Complaint {
 
   /** Returns a problem at a place. */
   public Problem of(int offset, int length, Command command, String message, String help) {
+    Fault fault = fault(offset, length, "J01", message, help);
+    return new Problem(command.index(), fault.line(), fault.column(), fault.toString());
+  }
+
+  /** Returns at its place, in words ready to be read, that the guard refuses something. */
+  public String refused(int offset, Command command, String message) {
+    int length = Math.max(1, command.codeEnd() - offset);
+    return fault(offset, length, "G01", message, Refusal.HELP).toString();
+  }
+
+  private Fault fault(int offset, int length, String code, String message, String help) {
     int place = Math.min(offset, workbook.text().length());
     int line = workbook.lineAt(place);
     int column = workbook.columnAt(place);
     String shown = workbook.lines().get(line - 1);
     int marks = Math.max(1, Math.min(length, shown.length() - column + 1));
-    Fault fault = new Fault(workbook.name(), line, column, marks, "J01", message, shown, help);
-    return new Problem(command.index(), line, column, fault.toString());
+    return new Fault(workbook.name(), line, column, marks, code, message, shown, help);
   }
 
   private static String words(String code, String text) {

@@ -2,9 +2,13 @@ package connate.run;
 
 import connate.compile.Compilation;
 import connate.compile.WholeCompiler;
+import connate.guard.Refusal;
+import connate.protocol.Event;
 import connate.protocol.Request;
+import connate.workbook.Command;
 import connate.workbook.Workbook;
 import java.nio.file.Path;
+import java.util.Optional;
 
 /** One run of a workbook from top to bottom in a fresh engine. */
 public final class Replay {
@@ -47,6 +51,14 @@ public final class Replay {
       return commandByCommand(begin, compilation.why());
     }
     try (engine) {
+      Optional<Refusal> refusal = Verdict.of(compilation.classes(), settings);
+      if (refusal.isPresent()) {
+        Command command = Verdict.command(workbook, refusal.get());
+        Event.Failed failed =
+            Verdict.placed(workbook, command, refusal.get().message(), refusal.get().line());
+        watch.run(command, told -> failed);
+        return watch.outcome(ReplaySettings.Way.WHOLE, "");
+      }
       engine.begin(begin);
       new WholeRun(workbook, compilation, engine, watch).run();
       return watch.outcome(ReplaySettings.Way.WHOLE, "");
@@ -54,8 +66,7 @@ public final class Replay {
   }
 
   private ReplayOutcome commandByCommand(Request.Begin begin, String why) {
-    ShellControl control =
-        new ShellControl(engine, null, begin, Verdict.of(workbook.name(), settings));
+    ShellControl control = new ShellControl(engine, null, begin, Verdict.of(settings));
     try (Shell shell = new Shell(control, workbook.name())) {
       new ShellRun(workbook, shell, watch).run();
       return watch.outcome(ReplaySettings.Way.SHELL, why);

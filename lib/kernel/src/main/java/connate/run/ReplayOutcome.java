@@ -28,7 +28,7 @@ public record ReplayOutcome(
     COMPLETED,
     /** A command did not compile, threw or took its engine with it; those after it did not run. */
     FAILED,
-    /** The guard refused a command; none ran. */
+    /** The guard refused a command; neither it nor any after it ran. */
     REFUSED,
     /** The replay was stopped from outside. */
     STOPPED

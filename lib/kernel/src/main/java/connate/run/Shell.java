@@ -68,7 +68,7 @@ public final class Shell implements AutoCloseable {
   public static Shell open(String name, java.nio.file.Path folder, ReplaySettings settings) {
     Request.Begin begin = Replay.begin(name, folder, settings);
     return new Shell(
-        new ShellControl(Engine.start(), Engine::start, begin, Verdict.of(name, settings)), name);
+        new ShellControl(Engine.start(), Engine::start, begin, Verdict.of(settings)), name);
   }
 
   /**

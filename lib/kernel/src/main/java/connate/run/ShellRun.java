@@ -48,6 +48,12 @@ final class ShellRun {
       return WholeRun.failed(
           workbook, complaint.of(command.codeStart(), 1, command, failed.message(), ""));
     }
+    if (result.last() instanceof Event.Failed failed
+        && failed.kind().equals("refused")
+        && failed.frames().isEmpty()) {
+      String message = failed.message().lines().findFirst().orElse("");
+      return Verdict.placed(workbook, command, message, 0);
+    }
     return result.last();
   }
 

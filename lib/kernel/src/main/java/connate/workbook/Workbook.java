@@ -93,6 +93,11 @@ public final class Workbook {
     return found >= 0 ? found + 1 : -found - 1;
   }
 
+  /** Returns where a line, counted from 1, begins in the text. */
+  public int startOf(int line) {
+    return starts[line - 1];
+  }
+
   /** Returns the column, counted from 1, of a place in the text. */
   public int columnAt(int offset) {
     return offset - text.lastIndexOf('\n', offset - 1);

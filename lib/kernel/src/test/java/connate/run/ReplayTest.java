@@ -204,6 +204,31 @@ class ReplayTest {
     assertEquals(List.of(new Event.Frame("", "w.jsh", 1)), replay.failure().frames());
   }
 
+  @ParameterizedTest
+  @EnumSource(names = {"WHOLE", "SHELL"})
+  void theGuardNamesCommandCallAndWayOut(ReplaySettings.Way way) {
+    Replays replay =
+        Replays.run(
+            "var a = 1;\n// why\nint n =\n  System.getenv().size();",
+            ReplaySettings.PLAIN.compiled(way));
+    assertEquals(ReplayOutcome.Kind.REFUSED, replay.outcome.kind());
+    assertEquals(1, replay.outcome.command().index());
+    String message = replay.failure().message();
+    int line = way == ReplaySettings.Way.WHOLE ? 4 : 3;
+    assertTrue(message.startsWith("w.jsh:" + line + ":"), message);
+    assertTrue(message.contains("error[G01]: «java.lang.System.getenv» is not allowed"), message);
+    assertTrue(message.contains("--trust"), message);
+  }
+
+  @Test
+  void filesOutsideOfTheFoldersAreRefused() {
+    Replays replay = Replays.run("well(\"../pom.xml\")", ReplaySettings.PLAIN);
+    assertEquals(ReplayOutcome.Kind.REFUSED, replay.outcome.kind());
+    assertEquals(
+        ReplayOutcome.Kind.FAILED,
+        Replays.run("well(\"../pom.xml\")", ReplaySettings.PLAIN.trusted()).outcome.kind());
+  }
+
   @Test
   void resultsHaveNamesOfTheirOwn() {
     Event.Failed failed =
