@@ -4,7 +4,6 @@ import connate.las.LasFile;
 import connate.series.Series;
 import connate.series.Unstated;
 import connate.table.Table;
-import connate.well.Tops;
 import connate.well.Well;
 import java.util.ArrayList;
 import java.util.List;
@@ -22,15 +21,6 @@ final class Reading {
     }
     input.told(teller, table.rows(), mapping);
     return table;
-  }
-
-  static Tops tops(Inputs.Input input, Teller teller) {
-    Table table = table(input, "", teller);
-    return Tops.of(table.labels("well"), table.labels("zone"), table.get(topColumn(table)));
-  }
-
-  private static String topColumn(Table table) {
-    return table.has("top") ? "top" : "depth";
   }
 
   static Well well(Inputs.Input input, Teller teller) {

@@ -7,9 +7,11 @@ import connate.protocol.Item;
 import connate.quantity.Quantity;
 import connate.series.Estimate;
 import connate.table.Table;
+import connate.well.Survey;
 import connate.well.Tops;
 import connate.well.Well;
 import connate.well.Wells;
+import java.util.Locale;
 import java.util.function.Function;
 
 /** The words of a workbook; its commands see them without a prefix. */
@@ -114,9 +116,15 @@ public final class Vocabulary {
     return Reading.table(session().inputs().read(file), sheet, session().teller());
   }
 
-  /** Reads the tops of zones from a table with the columns well, zone and top. */
+  /** Reads the tops of zones from a table with a column each for well, zone and top. */
   public static Tops tops(String file) {
-    return Reading.tops(session().inputs().read(file), session().teller());
+    return Tops.of(table(file));
+  }
+
+  /** Reads a well's path from a table of measured depth, inclination and azimuth, or from LAS. */
+  public static Survey survey(String file) {
+    boolean las = file.toLowerCase(Locale.ROOT).endsWith(".las");
+    return las ? Survey.of(well(file)) : Survey.of(table(file));
   }
 
   /** Reads a well from a LAS file. */
@@ -135,10 +143,5 @@ public final class Vocabulary {
   /** Returns draws from the seed of this replay. */
   public static Sampling seed() {
     return Sampling.seed(session().seed());
-  }
-
-  /** Returns draws from a seed of the workbook's own. */
-  public static Sampling seed(long number) {
-    return Sampling.seed(number);
   }
 }

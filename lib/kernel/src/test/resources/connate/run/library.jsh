@@ -30,3 +30,8 @@ Listing.titled("rows").column("name").column("k", mD).row("a", mD(3)).build()
 new Object()
 seed(3)
 Stream.of(3, 1, 2).sorted(Comparator.reverseOrder()).map(v -> mD(v)).toList()
+var runs = simulate(100, seed(7), draw -> Outcome.of("k", draw.of("k", lognormal(2.0, 0.5))));
+keep("k", runs.get("k").exceedance(90, 50, 10));
+show(crossplot(Series.of("x", m, 1, 2, 3), Series.of("y", mD, 10, 20, 15)));
+histogram(Series.of("x", m, 1, 2, 3, 3, 4))
+above(percent(8))
