@@ -22,7 +22,8 @@ final class ColumnLabels {
    */
   static int[] order(LasText text, Sections.Raw data, List<HeaderLine> curves) {
     for (String line : lines(text, data)) {
-      int[] order = match(line.strip().split("[ \t,]+"), curves);
+      int[] order =
+          match(Items.split(line.replace(',', ' '), (byte) 0).toArray(new String[0]), curves);
       if (order != null) {
         return order;
       }
@@ -32,8 +33,9 @@ final class ColumnLabels {
 
   private static List<String> lines(LasText text, Sections.Raw data) {
     List<String> lines = new ArrayList<>();
-    String[] title = data.title().strip().split("[ \t]+", 2);
-    lines.add(title.length < 2 ? "" : title[1]);
+    String title = data.title().strip();
+    int blank = title.replace('\t', ' ').indexOf(' ');
+    lines.add(blank < 0 ? "" : title.substring(blank));
     int end = text.lineEnd(data.bodyFrom());
     lines.add(comment(text, data.bodyFrom(), end));
     int above = text.lineStart(data.titleFrom()) - 1;
@@ -85,7 +87,9 @@ final class ColumnLabels {
   /** Returns the order that leaves every curve at its own column. */
   static int[] identity(int curves) {
     int[] order = new int[curves];
-    Arrays.setAll(order, i -> i);
+    for (int i = 0; i < curves; i++) {
+      order[i] = i;
+    }
     return order;
   }
 }

@@ -34,7 +34,9 @@ final class CurveChecks {
   /** Returns a name for each curve that no other has: the mnemonic, then with _2, _3 behind it. */
   List<String> names(List<HeaderLine> curves) {
     Set<String> all = new HashSet<>();
-    curves.forEach(c -> all.add(HeaderReader.key(c.mnemonic())));
+    for (HeaderLine curve : curves) {
+      all.add(HeaderReader.key(curve.mnemonic()));
+    }
     Map<String, Integer> seen = new HashMap<>();
     List<String> names = new ArrayList<>();
     for (int i = 0; i < curves.size(); i++) {

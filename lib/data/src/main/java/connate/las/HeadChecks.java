@@ -93,7 +93,10 @@ final class HeadChecks {
   }
 
   private void order() {
-    List<Kind> kinds = head.sections().stream().map(LasSection::kind).toList();
+    List<Kind> kinds = new ArrayList<>();
+    for (LasSection section : head.sections()) {
+      kinds.add(section.kind());
+    }
     if (!kinds.contains(Kind.PARAMETER)) {
       quirks.note("L76", 0, "no parameter section");
     } else if (kinds.indexOf(Kind.PARAMETER) < kinds.indexOf(Kind.CURVE)) {

@@ -13,7 +13,7 @@ final class HeaderNumber {
    */
   static double of(HeaderLine item) {
     String words = item.value().isEmpty() ? item.unit() : item.value();
-    for (String part : List.of(words, words.split("[ \t:]", 2)[0])) {
+    for (String part : List.of(words, firstPart(words))) {
       LooseNumber number = LooseNumber.of(part);
       if (!Double.isNaN(number.value())) {
         return number.value();
@@ -23,5 +23,15 @@ final class HeaderNumber {
       }
     }
     return Double.NaN;
+  }
+
+  private static String firstPart(String words) {
+    for (int i = 0; i < words.length(); i++) {
+      char c = words.charAt(i);
+      if (c == ' ' || c == '\t' || c == ':') {
+        return words.substring(0, i);
+      }
+    }
+    return words;
   }
 }

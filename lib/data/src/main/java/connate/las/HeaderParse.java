@@ -1,15 +1,11 @@
 package connate.las;
 
-import java.util.regex.Pattern;
-
 /**
  * Splits a header line: at the first dot, the first blank behind that dot, the last colon (LAS 2.0,
  * update of 2014). A colon inside a time ({@code 12:31}), behind a drive letter ({@code C:\}) or
  * inside braces at the end of the line does not end the value.
  */
 final class HeaderParse {
-
-  private static final Pattern BLANK_UNIT = Pattern.compile("\\d+ [A-Za-z][^ ]*");
 
   private HeaderParse() {}
 
@@ -24,7 +20,7 @@ final class HeaderParse {
   static HeaderLine withBlankUnit(HeaderLine curve) {
     boolean isNumber = !curve.unit().isEmpty() && Character.isDigit(curve.unit().charAt(0));
     String both = curve.unit() + " " + curve.value();
-    if (!isNumber || !BLANK_UNIT.matcher(both).matches()) {
+    if (!isNumber || !both.matches("\\d+ [A-Za-z][^ ]*")) {
       return curve;
     }
     return curve.withUnit(both, "");

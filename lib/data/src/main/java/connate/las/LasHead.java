@@ -1,6 +1,7 @@
 package connate.las;
 
 import connate.las.LasSection.Kind;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 
@@ -13,11 +14,16 @@ record LasHead(LasVersion version, List<LasSection> sections, double nullValue) 
 
   /** Returns the lines of all sections of a kind; of curves only those of the first section. */
   List<HeaderLine> items(Kind kind) {
-    return sections.stream()
-        .filter(s -> s.kind() == kind)
-        .limit(kind == Kind.CURVE ? 1 : Long.MAX_VALUE)
-        .flatMap(s -> s.items().stream())
-        .toList();
+    List<HeaderLine> items = new ArrayList<>();
+    for (LasSection section : sections) {
+      if (section.kind() == kind) {
+        items.addAll(section.items());
+        if (kind == Kind.CURVE) {
+          break;
+        }
+      }
+    }
+    return List.copyOf(items);
   }
 
   /** Returns the first line of a name: of the well, else of the parameters, else of the version. */

@@ -120,29 +120,30 @@ final class LasReader {
   }
 
   private static boolean is(LasHead head, String mnemonic, String value) {
-    return head.items(Kind.VERSION).stream()
-        .filter(i -> i.isNamed(mnemonic))
-        .findFirst()
-        .map(i -> (i.value().isEmpty() ? i.unit() : i.value()).equalsIgnoreCase(value))
-        .orElse(false);
+    HeaderLine item = item(head, Kind.VERSION, mnemonic);
+    return (item.value().isEmpty() ? item.unit() : item.value()).equalsIgnoreCase(value);
   }
 
   private IndexWords well(LasHead head) {
-    HeaderLine start = item(head, "STRT");
+    HeaderLine start = item(head, Kind.WELL, "STRT");
     return new IndexWords(
         HeaderNumber.of(start),
-        HeaderNumber.of(item(head, "STOP")),
-        HeaderNumber.of(item(head, "STEP")),
+        HeaderNumber.of(item(head, Kind.WELL, "STOP")),
+        HeaderNumber.of(item(head, Kind.WELL, "STEP")),
         start.unit(),
-        new int[] {start.line(), item(head, "STOP").line(), item(head, "STEP").line()},
+        new int[] {
+          start.line(), item(head, Kind.WELL, "STOP").line(), item(head, Kind.WELL, "STEP").line()
+        },
         head.nullValue());
   }
 
-  private static HeaderLine item(LasHead head, String mnemonic) {
-    return head.items(Kind.WELL).stream()
-        .filter(i -> i.isNamed(mnemonic))
-        .findFirst()
-        .orElse(HeaderLine.of(mnemonic, "", "", ""));
+  private static HeaderLine item(LasHead head, Kind kind, String mnemonic) {
+    for (HeaderLine item : head.items(kind)) {
+      if (item.isNamed(mnemonic)) {
+        return item;
+      }
+    }
+    return HeaderLine.of(mnemonic, "", "", "");
   }
 
   private List<LasCurve> curves(

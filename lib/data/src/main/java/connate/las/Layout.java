@@ -77,9 +77,15 @@ record Layout(byte delimiter, byte point, boolean wrapped) {
     if (items.size() != columns) {
       return false;
     }
-    return delimiter != 0
-        || columns == 1
-        || items.stream().limit(columns - 1L).noneMatch(i -> i.endsWith(",") || i.endsWith(";"));
+    if (delimiter != 0 || columns == 1) {
+      return true;
+    }
+    for (String item : items.subList(0, columns - 1)) {
+      if (item.endsWith(",") || item.endsWith(";")) {
+        return false;
+      }
+    }
+    return true;
   }
 
   /** Returns a comma where every value of the data has its decimals behind a comma, clearly. */

@@ -49,11 +49,17 @@ record LooseNumber(Kind kind, double value) {
           "-1.#qnan",
           "#num!",
           "#div/0!");
-  private static final Pattern FORTRAN =
-      Pattern.compile("([+-]?(?:\\d+\\.?\\d*|\\.\\d+))(?:[dD]([+-]?\\d{1,3})|([+-]\\d{2,3}))");
-  private static final Pattern EXPONENT =
-      Pattern.compile("[+-]?(?:\\d+\\.?\\d*|\\.\\d+)[eE][+-]?\\d+");
-  private static final Pattern COMMA = Pattern.compile("[+-]?\\d*(?:,\\d+)+(?:\\.\\d*)?");
+
+  /** Compiled only when an item is no plain number, which in most files is never. */
+  private static final class Patterns {
+
+    static final Pattern FORTRAN =
+        Pattern.compile("([+-]?(?:\\d+\\.?\\d*|\\.\\d+))(?:[dD]([+-]?\\d{1,3})|([+-]\\d{2,3}))");
+    static final Pattern EXPONENT = Pattern.compile("[+-]?(?:\\d+\\.?\\d*|\\.\\d+)[eE][+-]?\\d+");
+    static final Pattern COMMA = Pattern.compile("[+-]?\\d*(?:,\\d+)+(?:\\.\\d*)?");
+
+    private Patterns() {}
+  }
 
   /** Takes an item without the blanks around it. */
   static LooseNumber of(String item) {
@@ -68,19 +74,28 @@ record LooseNumber(Kind kind, double value) {
     if (NULL_WORDS.contains(lower)) {
       return new LooseNumber(Kind.NULL_WORD, Double.NaN);
     }
-    if (OVERFLOWS.contains(lower) || item.chars().allMatch(c -> c == '*')) {
+    if (OVERFLOWS.contains(lower) || isAllStars(item)) {
       return new LooseNumber(Kind.OVERFLOW, Double.NaN);
     }
-    var fortran = FORTRAN.matcher(item);
+    var fortran = Patterns.FORTRAN.matcher(item);
     if (fortran.matches()) {
       String power = fortran.group(2) == null ? fortran.group(3) : fortran.group(2);
       return new LooseNumber(Kind.FORTRAN, Double.parseDouble(fortran.group(1) + "e" + power));
     }
-    if (EXPONENT.matcher(item).matches()) {
+    if (Patterns.EXPONENT.matcher(item).matches()) {
       return new LooseNumber(Kind.OVERFLOW, Double.NaN);
     }
-    Kind kind = COMMA.matcher(item).matches() ? Kind.COMMA : Kind.TEXT;
+    Kind kind = Patterns.COMMA.matcher(item).matches() ? Kind.COMMA : Kind.TEXT;
     return new LooseNumber(kind, Double.NaN);
+  }
+
+  private static boolean isAllStars(String item) {
+    for (int i = 0; i < item.length(); i++) {
+      if (item.charAt(i) != '*') {
+        return false;
+      }
+    }
+    return true;
   }
 
   /** Tells whether the item has a value or says clearly that it has none. */

@@ -20,12 +20,25 @@ final class Quirks {
 
   /** Returns all, cautions first, in the order of their lines. */
   List<Quirk> sorted() {
-    List<Quirk> all = new ArrayList<>(found);
-    all.sort(
-        (a, b) ->
-            a.weight() == b.weight()
-                ? Integer.compare(a.line(), b.line())
-                : b.weight().compareTo(a.weight()));
+    List<Quirk> all = new ArrayList<>();
+    for (Quirk.Weight weight : new Quirk.Weight[] {Quirk.Weight.CAUTION, Quirk.Weight.NOTE}) {
+      for (Quirk quirk : found) {
+        if (quirk.weight() == weight) {
+          insert(all, quirk);
+        }
+      }
+    }
     return List.copyOf(all);
+  }
+
+  /** Puts a quirk behind those of its weight whose line is not larger. */
+  private static void insert(List<Quirk> all, Quirk quirk) {
+    int at = all.size();
+    while (at > 0
+        && all.get(at - 1).weight() == quirk.weight()
+        && all.get(at - 1).line() > quirk.line()) {
+      at--;
+    }
+    all.add(at, quirk);
   }
 }
