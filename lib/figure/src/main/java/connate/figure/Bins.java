@@ -111,18 +111,27 @@ record Bins(double[] edges, boolean log) {
         "");
   }
 
-  /** Returns the outline of the bars. */
+  /** Returns the outline of the bars, from the first that is not empty to the last. */
   Layer.Stroke outline(double[] counts, Look look, String label) {
-    double[] x = new double[2 * size() + 2];
-    double[] y = new double[x.length];
-    x[0] = edges[0];
-    for (int i = 0; i < size(); i++) {
-      x[2 * i + 1] = edges[i];
-      x[2 * i + 2] = edges[i + 1];
-      y[2 * i + 1] = counts[i];
-      y[2 * i + 2] = counts[i];
+    int first = 0;
+    int last = size() - 1;
+    while (first < last && counts[first] == 0) {
+      first++;
     }
-    x[x.length - 1] = edges[size()];
+    while (last > first && counts[last] == 0) {
+      last--;
+    }
+    int bins = last - first + 1;
+    double[] x = new double[2 * bins + 2];
+    double[] y = new double[x.length];
+    x[0] = edges[first];
+    for (int i = 0; i < bins; i++) {
+      x[2 * i + 1] = edges[first + i];
+      x[2 * i + 2] = edges[first + i + 1];
+      y[2 * i + 1] = counts[first + i];
+      y[2 * i + 2] = counts[first + i];
+    }
+    x[x.length - 1] = edges[last + 1];
     return new Layer.Stroke(x, y, look, Theme.LINE, label);
   }
 

@@ -119,7 +119,9 @@ final class PanelSvg {
   private void head(double row) {
     String title = panel.x().title();
     if (!panel.head()) {
-      canvas.text((x1 + x2) / 2, row, title, Theme.AXIS);
+      double most = x2 - x1 + 20;
+      String fitted = Wording.fit(title, t -> Theme.AXIS.width(t) * 1.08 <= most);
+      canvas.text((x1 + x2) / 2, row, fitted, Theme.AXIS);
       return;
     }
     List<String> lines =
@@ -215,7 +217,7 @@ final class PanelSvg {
         dots.look().mark(),
         dots.size(),
         dots.look().colour(),
-        Theme.POINT_OPACITY);
+        panel.head() ? Theme.OVER_OPACITY : Theme.POINT_OPACITY);
   }
 
   private void ribbon(Layer.Ribbon ribbon) {

@@ -60,7 +60,11 @@ final class PlotSvg {
     }
     Axis y = plot.panels().get(0).y();
     if (!y.title().isEmpty()) {
-      canvas.textUpwards(EDGE + 8, (y1 + y2) / 2, y.title(), Theme.AXIS);
+      double most = plot.height() - 2 * EDGE - 8;
+      String title = Wording.fit(y.title(), t -> Theme.AXIS.width(t) * SPARE <= most);
+      double half = Theme.AXIS.width(title) * SPARE / 2;
+      double middle = Math.min(Math.max((y1 + y2) / 2, EDGE + half), plot.height() - EDGE - half);
+      canvas.textUpwards(EDGE + 8, middle, title, Theme.AXIS);
     }
   }
 
@@ -76,7 +80,7 @@ final class PlotSvg {
 
   private double right() {
     Panel last = plot.panels().get(plot.panels().size() - 1);
-    return last.head() ? EDGE : 22;
+    return last.head() ? 20 : 24;
   }
 
   /** Places the key's entries in rows under the title and returns how many rows they need. */

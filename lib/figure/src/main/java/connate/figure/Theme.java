@@ -24,6 +24,10 @@ final class Theme {
 
   static final double POINT = 4;
   static final double POINT_OPACITY = 0.55;
+
+  /** For points over a log, which must be seen on its line. */
+  static final double OVER_OPACITY = 0.85;
+
   static final double LINE = 1.8;
   static final double LOG_LINE = 1;
   static final double BAND_OPACITY = 0.16;

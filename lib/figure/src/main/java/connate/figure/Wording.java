@@ -69,6 +69,18 @@ final class Wording {
     return count <= most ? text : text.substring(0, text.offsetByCodePoints(0, most - 1)) + "…";
   }
 
+  /** Returns a text shortened until it fits. */
+  static String fit(String text, Predicate<String> fits) {
+    String shorter = text;
+    for (int most = text.codePointCount(0, text.length()); most > 2; most--) {
+      if (fits.test(shorter)) {
+        break;
+      }
+      shorter = clip(text, most - 1);
+    }
+    return shorter;
+  }
+
   /** Breaks a text into lines that fit; a word that is too long is broken, too. */
   static List<String> wrap(String text, Predicate<String> fits) {
     List<String> lines = new ArrayList<>();

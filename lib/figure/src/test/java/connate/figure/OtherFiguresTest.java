@@ -179,4 +179,17 @@ class OtherFiguresTest {
       assertFalse(figure.sketch(5, 2).isEmpty());
     }
   }
+
+  /** Independent: no text of a figure starts or ends outside it, however long its names are. */
+  @Test
+  void longNamesStayInside() {
+    String name = "permeability to brine at in situ stress of the plugs from the northern wells ";
+    Series x = Invented.porosity(30).named(name + name);
+    Series y = Invented.permeability(30).named(name + name);
+    Figure figure = Figures.crossplot(x, y).byGroup(Invented.facies(30, name + "a", name + "b"));
+    SvgRules.check(figure);
+    String upright = figure.svg("a").split("rotate\\(-90\\)\">")[1].split("<")[0];
+    assertTrue(Theme.AXIS.width(upright) <= figure.height(), upright);
+    assertTrue(upright.endsWith("…"), upright);
+  }
 }

@@ -67,6 +67,6 @@ class SameBytesTest {
   void onEveryJdk() throws Exception {
     byte[] digest =
         MessageDigest.getInstance("SHA-256").digest(all().getBytes(StandardCharsets.UTF_8));
-    assertEquals("07a061e994d87a74", HexFormat.of().formatHex(digest).substring(0, 16));
+    assertEquals("3a65087de177b175", HexFormat.of().formatHex(digest).substring(0, 16));
   }
 }
