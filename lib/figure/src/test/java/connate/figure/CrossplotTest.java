@@ -139,7 +139,10 @@ class CrossplotTest {
     SvgRules.check(crossplot(phi(0.1, 0.2), k(1e-12, 1e15)));
   }
 
-  /** Bound of the design: 5,000 points stay at or under 150 KB. Measured: 51 KB, and 107 KB in six groups. */
+  /**
+   * Bound of the design: 5,000 points stay at or under 150 KB. Measured: 51 KB, and 107 KB in six
+   * groups.
+   */
   @Test
   void staysSmallWithManyPoints() {
     Series x = Invented.porosity(5000);
