@@ -74,12 +74,12 @@ public final class Inputs {
   }
 
   /**
-   * Reads the files that a pattern names, in the order of their names: those of the workbook's
-   * folder, or where there are none, those of the data folder.
+   * Reads the files that a pattern names, in the order of their names: those of the data folder, or
+   * where there are none, those of the workbook's.
    */
   List<Input> matching(String pattern) {
-    List<Path> own = Wells.files(folder, pattern);
-    List<Path> found = own.isEmpty() && data != null ? Wells.files(data, pattern) : own;
+    List<Path> first = data == null ? List.of() : Wells.files(data, pattern);
+    List<Path> found = first.isEmpty() ? Wells.files(folder, pattern) : first;
     if (found.isEmpty()) {
       throw new DataException(
           Fault.ofFile(
@@ -91,19 +91,16 @@ public final class Inputs {
     return found.stream().map(p -> read(shown(p))).toList();
   }
 
-  /** Returns where a file lies that the workbook names. */
+  /** Returns where a file lies that the workbook names: in the data folder first, then its own. */
   Path resolve(String name) {
-    Path own = folder.resolve(name).normalize();
-    if (Files.isRegularFile(own) || data == null) {
-      return existing(own, name);
-    }
-    Path other = data.resolve(name).normalize();
-    return existing(Files.isRegularFile(other) ? other : own, name);
+    Path first = data == null ? null : data.resolve(name).normalize();
+    boolean isData = first != null && Files.isRegularFile(first);
+    return existing(isData ? first : folder.resolve(name).normalize(), name);
   }
 
-  /** Returns the path as the workbook's folder sees it, with forward slashes. */
+  /** Returns the path as its folder sees it, with forward slashes. */
   String shown(Path path) {
-    Path base = path.startsWith(folder) || data == null || !path.startsWith(data) ? folder : data;
+    Path base = data != null && path.startsWith(data) ? data : folder;
     Path relative = path.startsWith(base) ? base.relativize(path) : path.getFileName();
     return relative.toString().replace('\\', '/');
   }
@@ -141,7 +138,7 @@ public final class Inputs {
   }
 
   private String places() {
-    return data == null ? " beside the workbook" : " beside the workbook or in the data folder";
+    return data == null ? " beside the workbook" : " in the data folder or beside the workbook";
   }
 
   private static String digest(byte[] content) {

@@ -11,7 +11,7 @@ public sealed interface Request {
    *
    * @param workbook the workbook's file name, as it stands in stack frames
    * @param folder the folder of the workbook
-   * @param data the folder in which data are looked for as well, empty for none
+   * @param data the folder in which data are looked for first, empty for none
    * @param assumptions the assumptions that take another value
    * @param seed the seed of all random numbers
    * @param guarded whether files outside of the two folders are refused

@@ -74,7 +74,8 @@ public final class Replay {
   }
 
   static Request.Begin begin(String name, Path folder, ReplaySettings settings) {
-    String data = settings.data() == null ? "" : settings.data().toAbsolutePath().toString();
+    String data =
+        settings.data() == null ? "" : settings.data().toAbsolutePath().normalize().toString();
     return new Request.Begin(
         name, folder.toString(), data, settings.assumptions(), settings.seed(), settings.guarded());
   }

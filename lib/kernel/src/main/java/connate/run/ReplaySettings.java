@@ -8,7 +8,7 @@ import java.util.TreeMap;
 /**
  * With what a workbook is replayed.
  *
- * @param data the folder in which data are looked for beside the workbook's own, {@code null} for
+ * @param data the folder in which data are looked for before the workbook's own, {@code null} for
  *     none
  * @param assumptions the assumptions that take another value: name and text
  * @param seed the seed of all random numbers
