@@ -8,6 +8,7 @@ import de.siegmar.fastcsv.reader.CommentStrategy;
 import de.siegmar.fastcsv.reader.CsvParseException;
 import de.siegmar.fastcsv.reader.CsvReader;
 import de.siegmar.fastcsv.reader.CsvRecord;
+import de.siegmar.fastcsv.reader.FieldMismatchStrategy;
 import java.nio.ByteBuffer;
 import java.nio.charset.CharacterCodingException;
 import java.nio.charset.Charset;
@@ -121,8 +122,8 @@ final class CsvSheet {
             .fieldSeparator(separator)
             .commentStrategy(CommentStrategy.NONE)
             .skipEmptyLines(true)
-            .allowExtraFields(true)
-            .allowMissingFields(true)
+            .extraFieldStrategy(FieldMismatchStrategy.IGNORE)
+            .missingFieldStrategy(FieldMismatchStrategy.IGNORE)
             .maxBufferSize(16 * CELL)
             .ofCsvRecord(text)) {
       for (CsvRecord cells : reader) {
