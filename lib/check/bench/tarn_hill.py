@@ -62,7 +62,7 @@ for _ in range(60):
     with np.errstate(divide="ignore", invalid="ignore"):
         k = ka / (1 + 12.639 * k ** -0.33 / pm)
 s = stress * 145.037738
-k = k * np.exp(1.0 * (np.exp(-s / 3000) - 1)) / (1 + 3e-6 * s)
+k = k * np.exp(0.25 * (np.exp(-s / 3000) - 1)) / (1 + 3e-6 * s)
 plugs["k"] = k
 phi = plugs.porosity.to_numpy() / 100
 

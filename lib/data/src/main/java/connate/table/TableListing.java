@@ -4,6 +4,7 @@ import connate.quantity.Numbers;
 import connate.series.Listing;
 import connate.series.Series;
 import connate.series.Unstated;
+import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
@@ -39,7 +40,7 @@ final class TableListing {
       if (column.isMissing(row)) {
         cells.add(null);
       } else if (column.isNumeric()) {
-        cells.add(column.numbers().value(row));
+        cells.add(new BigDecimal(column.text(row)));
       } else {
         cells.add(column.words().label(row));
       }

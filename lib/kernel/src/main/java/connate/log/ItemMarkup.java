@@ -77,12 +77,7 @@ final class ItemMarkup {
   }
 
   private void picture(Item.Picture picture) {
-    out.open("figure").checked(SvgGate.pass(picture.svg()));
-    out.open("figcaption").text(picture.title());
-    for (String note : picture.notes()) {
-      out.empty("br").text(note);
-    }
-    out.close().close();
+    out.open("figure").checked(SvgGate.pass(picture.svg())).close();
   }
 
   private static String label(Item.Grid grid) {

@@ -36,15 +36,15 @@ final class StepMarkup {
   }
 
   private void write(Command command) {
-    String kind = log.ran(command) ? "command" : "command idle";
-    out.open("div", "class", kind, "id", id(command));
-    out.leaf("span", Integer.toString(command.firstLine()), "class", "at");
-    out.leaf("pre", command.source().strip(), "class", "code");
     List<Event> beside = new ArrayList<>();
     List<Event> beneath = new ArrayList<>();
     for (Event event : shown(log.of(command))) {
       (isWide(event) || !beneath.isEmpty() ? beneath : beside).add(event);
     }
+    String kind = beside.isEmpty() ? "command alone" : "command";
+    out.open("div", "class", log.ran(command) ? kind : kind + " idle", "id", id(command));
+    out.leaf("span", Integer.toString(command.firstLine()), "class", "at");
+    out.leaf("pre", command.source().strip(), "class", "code");
     block("gave", beside);
     block("gave wide", beneath);
     out.close().line();

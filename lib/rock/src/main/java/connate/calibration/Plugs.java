@@ -112,7 +112,7 @@ final class Plugs {
   /** Tells how many plugs a fit left out, where it left out any. */
   void tellDropped(String about) {
     if (rows.length < total) {
-      Listening.caution(Caution.of(DROPPED, about, count()));
+      Listening.caution(Caution.of(DROPPED, about, "the fit uses " + count()));
     }
   }
 

@@ -1,6 +1,7 @@
 package connate.calibration;
 
 import connate.formula.TransformForm;
+import connate.method.Listening;
 import connate.quantity.Units;
 import connate.series.Labels;
 import connate.series.Listing;
@@ -41,8 +42,12 @@ public final class Transforms {
             .column("scatter", Units.decades)
             .column(test.words(), Units.decades)
             .column("R²");
+    Plugs.of(porosity, permeability, phi -> phi).tellDropped("comparison of transforms");
+    for (TransformForm form : forms) {
+      Listening.used(form.card());
+    }
     java.util.Arrays.stream(forms)
-        .map(form -> Candidate.of(form, porosity, permeability, test))
+        .map(form -> Listening.quietly(() -> Candidate.of(form, porosity, permeability, test)))
         .sorted(java.util.Comparator.comparingDouble(Candidate::error))
         .forEach(c -> c.addTo(table));
     return table.note("best first by the error of the plugs left out").build();

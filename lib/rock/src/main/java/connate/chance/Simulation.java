@@ -23,11 +23,6 @@ public final class Simulation {
 
   private Simulation() {}
 
-  /** Returns plain independent draws from a seed. */
-  public static Sampling seed(long seed) {
-    return Sampling.seed(seed);
-  }
-
   /**
    * Runs a calculation.
    *

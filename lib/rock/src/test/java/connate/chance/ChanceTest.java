@@ -5,7 +5,7 @@ import static connate.chance.Distributions.normal;
 import static connate.chance.Distributions.normalBetween;
 import static connate.chance.Distributions.triangular;
 import static connate.chance.Distributions.uniform;
-import static connate.chance.Simulation.seed;
+import static connate.chance.Sampling.seed;
 import static connate.chance.Simulation.simulate;
 import static connate.quantity.Units.mD;
 import static connate.quantity.Units.percent;
