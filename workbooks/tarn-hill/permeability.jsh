@@ -65,12 +65,12 @@ for (var w : wells) {
     w.add("PHI", phi.map(p -> Math.max(p, 0)));
     w.add("K", fit.expected(w.get("PHI")));
 }
-var th3   = wells.named("TH-3");
 var core3 = core.where("well", "TH-3");
-show(depthPlot(th3.get("GR"))
-    .track(th3.get("PHI"), core3.get("porosity"))
-    .track(th3.get("K"), core3.get("k"))
-    .named("TH-3"));
+show(depthPlot(wells.named("TH-3"))
+    .track("GR")
+    .track("PHI", core3.get("porosity"))
+    .track("K", core3.get("k"))
+    .zones(tops));
 
 /// ## Layers
 /// Along the layers the arithmetic mean holds, across them the harmonic; the truth for a block lies
