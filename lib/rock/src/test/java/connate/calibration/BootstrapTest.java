@@ -3,6 +3,8 @@ package connate.calibration;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 
+import connate.checks.Check;
+import connate.checks.Kind;
 import java.util.Arrays;
 import java.util.List;
 import org.junit.jupiter.api.Test;
@@ -25,6 +27,10 @@ class BootstrapTest {
    * replicates; R's boot with B = 20000 gives BCa (116.2, 264.0). Tolerance 5 as these differ.
    */
   @Test
+  @Check(
+      method = "bootstrap",
+      kind = Kind.PUBLISHED,
+      source = "Efron and Tibshirani (1993), An Introduction to the Bootstrap, table 14.2")
   void spatialTestData() {
     Bootstrap boot = Bootstrap.of(SPATIAL, BootstrapTest::plugInVariance, 20_000, 3);
     assertEquals(171.5, boot.estimate(), 0.05);

@@ -5,6 +5,8 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import connate.checks.Check;
+import connate.checks.Kind;
 import connate.quantity.Units;
 import connate.series.Labels;
 import connate.series.Listing;
@@ -32,6 +34,10 @@ class LogLinearTest {
    * which is 10.9648 mD at φ = 0.2. Points on the line give the line back.
    */
   @Test
+  @Check(
+      method = "log-linear",
+      kind = Kind.PUBLISHED,
+      source = "Wangen (2010), Physical Principles of Sedimentary Basin Analysis, p. 18")
   void pointsOnALineGiveTheLine() {
     Series phi = porosity(8, 12, 17, 24);
     TransformFit fit = LogLinear.fit(phi, bloch(phi));

@@ -4,6 +4,8 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 
 import connate.chance.Distributions;
+import connate.checks.Check;
+import connate.checks.Kind;
 import connate.quantity.Units;
 import connate.series.Series;
 import java.util.Arrays;
@@ -32,6 +34,10 @@ class LognormalMeanTest {
    * exp(1/2) = 1.6487, within four standard errors.
    */
   @Test
+  @Check(
+      method = "sichel",
+      kind = Kind.INDEPENDENT,
+      source = "mean of 40,000 seeded lognormal sets")
   void unbiased() {
     int sets = 40_000;
     double[] means = new double[sets];
@@ -54,6 +60,7 @@ class LognormalMeanTest {
    * Published: Swanson's rule against the exact mean at σ = 1: ratio 0.948583 (Hurst et al 2000).
    */
   @Test
+  @Check(method = "swanson-mean", kind = Kind.INDEPENDENT, source = "exact mean of a lognormal law")
   void swansonFallsShort() {
     int n = 4001;
     double[] k = new double[n];

@@ -2,6 +2,8 @@ package connate.calibration;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
+import connate.checks.Check;
+import connate.checks.Kind;
 import connate.quantity.Units;
 import connate.series.Series;
 import org.junit.jupiter.api.Test;
@@ -14,6 +16,10 @@ class PowerLawTest {
    * 100^3.05.
    */
   @Test
+  @Check(
+      method = "power-law",
+      kind = Kind.PUBLISHED,
+      source = "Bourbié and Zinszner (1985), J. Geophys. Res. 90, 11524")
   void pointsOnThePublishedLawGiveItBack() {
     double[] percent = {9, 12, 18, 27};
     double[] k =

@@ -7,6 +7,8 @@ import connate.chance.Distribution;
 import connate.chance.Distributions;
 import connate.chance.QuantileRule;
 import connate.chance.Quantiles;
+import connate.checks.Check;
+import connate.checks.Kind;
 import connate.checks.SharedData;
 import connate.series.Labels;
 import java.util.Arrays;
@@ -69,6 +71,10 @@ class ReferenceTest {
   }
 
   @Test
+  @Check(
+      method = "reduced-major-axis",
+      kind = Kind.INDEPENDENT,
+      source = "R 4.2.2 on the data set rock")
   void otherLinesOfTheRockData() {
     List<String[]> rows = SharedData.csv(ROCK);
     ReducedMajorAxis line = ReducedMajorAxis.fit(SharedData.column(rows, "peri"), lnK(rows));
@@ -80,6 +86,10 @@ class ReferenceTest {
   }
 
   @Test
+  @Check(
+      method = "gaussian-mixture",
+      kind = Kind.INDEPENDENT,
+      source = "maximum likelihood by R 4.2.2, optim")
   void mixtureReachesTheMaximumOfAGeneralOptimiser() {
     double[] x = DoubleStream.concat(quantiles(-0.5, 0.3, 60), quantiles(0.6, 0.25, 40)).toArray();
     GaussianMixture mixture = GaussianMixture.of(x, 2);
@@ -93,6 +103,7 @@ class ReferenceTest {
 
   /** Both are draws: with B replicates an end wanders by about 4/√(B/1000) here. */
   @Test
+  @Check(method = "bootstrap", kind = Kind.INDEPENDENT, source = "R 4.2.2, package boot")
   void bootstrapOfBoot() {
     double[] a = {
       48, 36, 20, 29, 42, 42, 20, 42, 22, 41, 45, 14, 6, 0, 33, 28, 34, 4, 32, 24, 47, 41, 24, 26,

@@ -3,6 +3,8 @@ package connate.heterogeneity;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 
+import connate.checks.Check;
+import connate.checks.Kind;
 import connate.quantity.Units;
 import connate.series.Series;
 import java.util.stream.IntStream;
@@ -22,6 +24,10 @@ class DykstraParsonsTest {
 
   /** Independent: samples at the exact quantiles i/(n+1) lie on the line, which gives σ back. */
   @Test
+  @Check(
+      method = "dykstra-parsons",
+      kind = Kind.INDEPENDENT,
+      source = "exact quantiles of a lognormal law")
   void quantilesOfALognormalGiveItsSpread() {
     NormalDistribution normal = new NormalDistribution(null, 0, 1);
     double[] k =

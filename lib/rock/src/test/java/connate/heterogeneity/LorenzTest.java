@@ -3,6 +3,8 @@ package connate.heterogeneity;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import connate.checks.Check;
+import connate.checks.Kind;
 import connate.quantity.Units;
 import connate.series.Series;
 import org.junit.jupiter.api.Test;
@@ -22,6 +24,7 @@ class LorenzTest {
 
   /** By hand: two equal layers 100 and 10 mD: L = 2((0.5 · 10/11/2 + 0.5 (10/11 + 1)/2) - 1/2). */
   @Test
+  @Check(method = "lorenz", kind = Kind.BY_HAND, source = "two and three equal layers")
   void twoAndThreeLayers() {
     assertEquals(0.4090909, curve(10, 100).coefficient().value(), 5e-8);
     assertEquals(0.5945946, curve(3, 300, 30).coefficient().value(), 5e-8);
@@ -37,6 +40,7 @@ class LorenzTest {
 
   /** Independent: 20,000 equal layers at the quantiles of a lognormal come close to erf(σ/2). */
   @Test
+  @Check(method = "lorenz", kind = Kind.INDEPENDENT, source = "erf(σ/2) of a lognormal law")
   void manyLayersApproachTheLognormal() {
     var normal = new org.apache.commons.math3.distribution.NormalDistribution(null, 0, 1);
     int n = 20_000;
