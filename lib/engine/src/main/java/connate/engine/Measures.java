@@ -50,7 +50,8 @@ final class Measures {
   }
 
   private static Item.Measure number(Number number) {
-    double value = number.doubleValue();
+    double value =
+        number instanceof Float ? Double.parseDouble(number.toString()) : number.doubleValue();
     boolean whole = !(number instanceof Double || number instanceof Float);
     String text = whole || !Double.isFinite(value) ? whole(number) : Numbers.text(value);
     return new Item.Measure("number", value, "", Double.NaN, Double.NaN, "", 0, text);

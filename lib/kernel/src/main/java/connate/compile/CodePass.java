@@ -106,7 +106,13 @@ final class CodePass {
     TypeName before = types.put(variable.name(), variable.type());
     if (before == null) {
       declared.put(variable.name(), command.index());
-      sheet.add("static " + type(variable) + " " + variable.name() + "; ");
+      sheet.add("static ");
+      if (variable.typeFrom() < 0) {
+        sheet.add(type(variable));
+      } else {
+        sheet.copy(variable.typeFrom(), type(variable));
+      }
+      sheet.add(" " + variable.name() + "; ");
     } else if (!before.equals(variable.type()) || !before.exact()) {
       clash =
           "«"

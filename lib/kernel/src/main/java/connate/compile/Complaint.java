@@ -68,7 +68,7 @@ public final class Complaint {
   private static String words(String code, String text) {
     Matcher symbol = SYMBOL.matcher(text);
     if (code.startsWith("compiler.err.cant.resolve") && symbol.find()) {
-      String kind = symbol.group(1).equals("class") ? "type" : symbol.group(1);
+      String kind = kind(symbol.group(1), symbol.group(2));
       Matcher where = WHERE.matcher(text);
       boolean own =
           !where.find()
@@ -81,6 +81,12 @@ public final class Complaint {
         .filter(l -> !l.isEmpty())
         .reduce((a, b) -> a + "; " + b)
         .orElse("does not compile");
+  }
+
+  /** A name with a capital may be meant as a type, even where the compiler looks for a variable. */
+  private static String kind(String said, String name) {
+    boolean capital = said.equals("variable") && Character.isUpperCase(name.charAt(0));
+    return capital ? "type or variable" : said.equals("class") ? "type" : said;
   }
 
   private String help(String code, String text, Command command) {

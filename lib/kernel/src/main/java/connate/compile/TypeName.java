@@ -24,7 +24,12 @@ public record TypeName(String text, boolean exact) {
   private static final Pattern COMMA = Pattern.compile(",\\s*");
   private static final Pattern QUALIFIER =
       Pattern.compile("\\b(?:[a-z_][A-Za-z0-9_]*\\.)+(?=[A-Z$])");
-  private static final TypeName NONE = new TypeName("", false);
+
+  /** No type that could be written. */
+  static final TypeName NONE = new TypeName("", false);
+
+  /** The type of what may be anything. */
+  static final TypeName OBJECT = new TypeName("java.lang.Object", true);
 
   /** Writes a type. */
   public static TypeName of(TypeMirror type) {

@@ -24,6 +24,8 @@ import java.util.Set;
 import java.util.TreeMap;
 import javax.lang.model.element.Element;
 import javax.lang.model.element.ExecutableElement;
+import javax.lang.model.type.ArrayType;
+import javax.lang.model.type.DeclaredType;
 import javax.lang.model.type.TypeKind;
 import javax.lang.model.type.TypeMirror;
 
@@ -171,24 +173,47 @@ final class TypePass {
     ExpressionTree value = tree.getInitializer();
     boolean isVoid = expression && isVoid(path, value);
     boolean isNull = value != null && value.getKind() == Tree.Kind.NULL_LITERAL && expression;
-    boolean broken = !isVoid && !isNull && (type == null || type.getKind() == TypeKind.ERROR);
+    boolean broken = !isVoid && !isNull && (type == null || isUnknown(type));
     String name = expression ? assigned(value) : tree.getName().toString();
     TypeName typeName =
-        isNull
-            ? new TypeName("java.lang.Object", true)
-            : isVoid || broken ? new TypeName("", false) : TypeName.of(type);
+        isNull ? TypeName.OBJECT : isVoid ? TypeName.NONE : written(tree, type, broken);
+    int typeFrom =
+        broken && typeName.isWritten()
+            ? sheet.offset(positions.getStartPosition(pass.unit(), tree.getType()))
+            : -1;
     if (value == null) {
-      return new Variable(name, typeName, isVoid, broken, -1, -1, false);
+      return new Variable(name, typeName, typeFrom, isVoid, broken, -1, -1, false);
     }
     int[] place = initial(tree);
     return new Variable(
         name,
         typeName,
+        typeFrom,
         isVoid,
         broken,
         sheet.offset(place[0]),
         sheet.offset(place[1]),
         value instanceof NewArrayTree array && array.getType() == null);
+  }
+
+  private static boolean isUnknown(TypeMirror type) {
+    if (type instanceof ArrayType array) {
+      return isUnknown(array.getComponentType());
+    }
+    return type.getKind() == TypeKind.ERROR
+        || type.getKind() == TypeKind.DECLARED
+            && ((DeclaredType) type).getTypeArguments().stream().anyMatch(TypePass::isUnknown);
+  }
+
+  /** A type that is not known is written as it stands, for the compiler to complain about. */
+  private TypeName written(VariableTree tree, TypeMirror type, boolean broken) {
+    if (!broken) {
+      return TypeName.of(type);
+    }
+    int from = (int) positions.getStartPosition(pass.unit(), tree.getType());
+    int to = (int) positions.getEndPosition(pass.unit(), tree.getType());
+    String text = from < 0 || to <= from ? "var" : sheet.toString().substring(from, to);
+    return text.equals("var") ? TypeName.NONE : new TypeName(text.replace('\n', ' '), true);
   }
 
   private boolean isVoid(TreePath path, ExpressionTree value) {

@@ -46,7 +46,12 @@ public final class WholeCompiler {
 
   /** Compiles a workbook against a class path. */
   public static Compilation compile(Workbook workbook, String classPath) {
-    return new WholeCompiler(workbook, classPath).compile();
+    String lean = LeanPath.of(classPath);
+    Compilation compilation = new WholeCompiler(workbook, lean).compile();
+    boolean settled = compilation.isUsable() && compilation.problem() == null;
+    return settled || lean.equals(classPath)
+        ? compilation
+        : new WholeCompiler(workbook, classPath).compile();
   }
 
   private Compilation compile() {
@@ -84,12 +89,22 @@ public final class WholeCompiler {
       problem = forward.problem(complaint);
       runnable = commands.indexOf(forward.command());
     }
+    if (hasGuess(variables, runnable)) {
+      return Compilation.commandByCommand("the type of a variable is not to be found");
+    }
     List<Request.Bytecode> classes = pass.generate();
     if (!pass.errors().isEmpty()) {
       return refused(pass, variables);
     }
     List<Entry> entries = entries(variables, references).subList(0, runnable);
     return new Compilation(Header.OWNER, classes, entries, problem, "");
+  }
+
+  /** Returns whether a command that is to run has a type that the compiler did not find. */
+  private boolean hasGuess(Map<Integer, List<Variable>> variables, int runnable) {
+    return commands.subList(0, runnable).stream()
+        .flatMap(command -> variables.getOrDefault(command.index(), List.of()).stream())
+        .anyMatch(v -> v.broken() && !v.type().isWritten());
   }
 
   private boolean lateImport() {

@@ -22,9 +22,9 @@ class AgreementTest {
       String text = new String(in.readAllBytes(), StandardCharsets.UTF_8);
       Workbook workbook = Workbook.parse(name, Path.of("target"), text);
       Replays whole =
-          Replays.run(workbook, ReplaySettings.PLAIN.trusted().compiled(ReplaySettings.Way.WHOLE));
+          Replays.run(workbook, ReplaySettings.PLAIN.compiled(ReplaySettings.Way.WHOLE));
       Replays shell =
-          Replays.run(workbook, ReplaySettings.PLAIN.trusted().compiled(ReplaySettings.Way.SHELL));
+          Replays.run(workbook, ReplaySettings.PLAIN.compiled(ReplaySettings.Way.SHELL));
       assertEquals(String.join("\n", shell.lines), String.join("\n", whole.lines));
       assertEquals(shell.outcome.kind(), whole.outcome.kind());
     }

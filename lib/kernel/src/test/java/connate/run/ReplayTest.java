@@ -48,6 +48,30 @@ class ReplayTest {
 
   @ParameterizedTest
   @EnumSource(names = {"WHOLE", "SHELL"})
+  void unknownTypesAndMethodsAreTold(ReplaySettings.Way way) {
+    for (String text :
+        java.util.List.of(
+            "Fooo x = null;",
+            "var x = fooo(1);",
+            "Fooo[] x;",
+            "List<Fooo> x = null;",
+            "fooo(1)",
+            "int f(Fooo v) { return 1; }",
+            "var x = new Fooo();",
+            "record R(Fooo v) {}",
+            "for (Fooo v : List.of()) { }",
+            "fooo",
+            "int x = 1, y = fooo;")) {
+      Event.Failed failed = Replays.run("1\n" + text, by(way)).failure();
+      assertEquals("compile", failed.kind(), text);
+      assertTrue(failed.message().startsWith("w.jsh:2:"), failed.message());
+      assertTrue(
+          failed.message().toLowerCase(java.util.Locale.ROOT).contains("«fooo"), failed.message());
+    }
+  }
+
+  @ParameterizedTest
+  @EnumSource(names = {"WHOLE", "SHELL"})
   void aBracketLeftOpenIsToldWhereItStands(ReplaySettings.Way way) {
     Replays replay = Replays.run("var a = 1;\nvar b = List.of(1;\n\nvar c = 2;", by(way));
     assertTrue(
