@@ -10,14 +10,19 @@ final class Help {
 
   private Help() {}
 
-  static String text(Collection<String> commands) {
+  static String text() {
     return String.join(
         "\n",
         "connate replay workbooks/tarn-hill/permeability.jsh",
         "connate replay north.jsh --assume \"porosity cutoff=10 %\" --out north-10.html",
         "",
         "A scripting kernel for the permeability of rock. Commands:",
-        "  " + String.join(", ", commands),
+        "  replay WORKBOOK     run it from top to bottom and write its log",
+        "  compare OLD NEW     two logs: what moved, and by how much",
+        "  verify LOG          replay what a log carries; which results come out again",
+        "  unpack LOG DIR      workbook and data of a packed log",
+        "  check WORKBOOK      parse and compile; name missing inputs; run nothing",
+        "  methods [WORDS]     the catalogue of published methods",
         "connate COMMAND --help tells what it takes.",
         "",
         "Exit: 0 done, 1 ran but failed or differs, 2 usage, 3 bad input data,",

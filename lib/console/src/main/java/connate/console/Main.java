@@ -19,6 +19,11 @@ public final class Main {
   private static Map<String, Supplier<Callable<Integer>>> commands() {
     Map<String, Supplier<Callable<Integer>>> commands = new LinkedHashMap<>();
     commands.put("replay", ReplayCommand::new);
+    commands.put("compare", CompareCommand::new);
+    commands.put("verify", VerifyCommand::new);
+    commands.put("unpack", UnpackCommand::new);
+    commands.put("check", CheckCommand::new);
+    commands.put("methods", MethodsCommand::new);
     return commands;
   }
 
@@ -30,7 +35,7 @@ public final class Main {
   static int run(String... arguments) {
     String first = arguments.length == 0 ? "--help" : arguments[0];
     if (first.equals("--help") || first.equals("-h")) {
-      System.out.println(Help.text(COMMANDS.keySet()));
+      System.out.println(Help.text());
       return Exit.DONE;
     }
     if (first.equals("--version")) {

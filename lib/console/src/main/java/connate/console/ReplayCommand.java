@@ -1,24 +1,17 @@
 package connate.console;
 
 import connate.file.AtomicFile;
-import connate.log.LogPage;
-import connate.log.RunFacts;
 import connate.record.LogRecord;
 import connate.record.ReplayLog;
-import connate.run.Replay;
-import connate.run.ReplayOutcome;
 import connate.run.ReplaySettings;
 import connate.workbook.Workbook;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.time.Duration;
-import java.time.Instant;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.concurrent.Callable;
-import org.jline.utils.Signals;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
@@ -63,7 +56,7 @@ final class ReplayCommand implements Callable<Integer> {
   @Option(names = "--trust", description = "lift the guard; the log says so")
   private boolean trust;
 
-  @Option(names = "--json", description = "print the record as JSON")
+  @Option(names = "--json", description = "print the kept results as JSON")
   private boolean json;
 
   @Option(
@@ -73,8 +66,6 @@ final class ReplayCommand implements Callable<Integer> {
 
   @Override
   public Integer call() throws IOException {
-    Instant when = Instant.now();
-    long start = System.nanoTime();
     if (!Files.isRegularFile(file)) {
       System.err.println(Missing.words("workbook", file));
       return Exit.BAD_INPUT;
@@ -84,34 +75,19 @@ final class ReplayCommand implements Callable<Integer> {
       return Exit.USAGE;
     }
     byte[] bytes = Files.readAllBytes(file);
-    Workbook workbook = Workbook.parse(file);
-    ReplayLog log = new ReplayLog(workbook, settings);
-    ReplayOutcome outcome = run(workbook, settings, log);
-    log.ended(outcome);
-    LogRecord record = LogRecord.of(log, bytes, pack);
-    Duration took = Duration.ofNanos(System.nanoTime() - start);
-    Path written = write(LogPage.of(log, record, new RunFacts(when, took, way(outcome))));
+    Replayed done = Replayed.run(Workbook.parse(file), bytes, settings, pack, !quiet);
+    ReplayLog log = done.log();
+    Path written = write(done.page());
     Report report = new Report(log, System.out, System.err);
     if (json) {
-      System.out.println(record.json());
+      System.out.println(LogRecord.kept(log));
     } else {
       report.results(written);
     }
     if (!quiet) {
       report.cautions();
     }
-    return report.ending(outcome, written);
-  }
-
-  private ReplayOutcome run(Workbook workbook, ReplaySettings settings, ReplayLog log) {
-    Replay replay =
-        Replay.of(workbook, settings, new Progress(log, workbook.commands().size(), !quiet));
-    Object before = Signals.register("INT", replay::stop);
-    try {
-      return replay.run();
-    } finally {
-      Signals.unregister("INT", before);
-    }
+    return report.ending(log.outcome(), written);
   }
 
   private ReplaySettings settings() {
@@ -130,11 +106,6 @@ final class ReplayCommand implements Callable<Integer> {
               assumption.substring(0, equals).strip(), assumption.substring(equals + 1).strip());
     }
     return trust ? settings.trusted() : settings;
-  }
-
-  private static String way(ReplayOutcome outcome) {
-    String way = outcome.way() == ReplaySettings.Way.WHOLE ? "at once" : "command by command";
-    return outcome.why().isEmpty() ? way : way + ": " + outcome.why();
   }
 
   private Path write(String page) {

@@ -46,6 +46,23 @@ public record LogRecord(String json, Optional<String> pack, String workbookSha25
     return new LogRecord(json, pack, sha256);
   }
 
+  /**
+   * Returns the kept results alone as JSON, one a line, with how the replay ended: the same bytes
+   * for the same results on any machine.
+   */
+  public static String kept(ReplayLog log) {
+    StringBuilder out = new StringBuilder("{\n");
+    out.append(
+        write(json -> outcomeObject(json, log)).replaceFirst("^\\{", "").replaceFirst("}$", ""));
+    out.append(",\n\"kept\":[");
+    String between = "\n";
+    for (ReplayLog.Of<Event.Kept> of : log.kept()) {
+      out.append(between).append(write(json -> keptObject(json, of)));
+      between = ",\n";
+    }
+    return out.append("\n]}").toString();
+  }
+
   /** Writes JSON. */
   private interface Body {
     void write(JsonGenerator out) throws IOException;
@@ -85,6 +102,21 @@ public record LogRecord(String json, Optional<String> pack, String workbookSha25
     out.writeEndObject();
   }
 
+  private static void outcomeObject(JsonGenerator out, ReplayLog log) throws IOException {
+    out.writeStartObject();
+    outcome(out, log);
+    out.writeEndObject();
+  }
+
+  private static void keptObject(JsonGenerator out, ReplayLog.Of<Event.Kept> of)
+      throws IOException {
+    out.writeStartObject();
+    out.writeStringField("name", of.event().name());
+    measure(out, of.event().value());
+    out.writeNumberField("line", of.command().firstLine());
+    out.writeEndObject();
+  }
+
   private static void outcome(JsonGenerator out, ReplayLog log) throws IOException {
     if (log.outcome() == null) {
       return;
@@ -104,11 +136,7 @@ public record LogRecord(String json, Optional<String> pack, String workbookSha25
   private static void kept(JsonGenerator out, ReplayLog log) throws IOException {
     out.writeArrayFieldStart("kept");
     for (ReplayLog.Of<Event.Kept> of : log.kept()) {
-      out.writeStartObject();
-      out.writeStringField("name", of.event().name());
-      measure(out, of.event().value());
-      out.writeNumberField("line", of.command().firstLine());
-      out.writeEndObject();
+      keptObject(out, of);
     }
     out.writeEndArray();
   }
