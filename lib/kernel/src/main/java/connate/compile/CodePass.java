@@ -16,13 +16,19 @@ final class CodePass {
   private static final Map<String, String> ZERO = Map.of("boolean", "false", "char", "'\\0'");
 
   private final List<Command> commands;
+  private final List<String> preload;
   private final Map<Integer, List<Variable>> variables;
   private final Sheet sheet;
   private final Map<String, Integer> declared = new HashMap<>();
   private final Map<String, TypeName> types = new HashMap<>();
   private String clash = "";
 
-  CodePass(Workbook workbook, List<Command> commands, Map<Integer, List<Variable>> variables) {
+  CodePass(
+      Workbook workbook,
+      List<Command> commands,
+      Map<Integer, List<Variable>> variables,
+      List<String> preload) {
+    this.preload = preload;
     this.commands = commands;
     this.variables = variables;
     this.sheet = new Sheet(workbook);
@@ -48,7 +54,7 @@ final class CodePass {
   }
 
   private void write() {
-    Header.write(sheet, commands);
+    Header.write(sheet, commands, preload);
     sheet.add("class " + Header.OWNER + " { ");
     for (Command command : commands) {
       switch (command.kind()) {

@@ -1,6 +1,5 @@
 package connate.compile;
 
-import connate.protocol.Preload;
 import connate.workbook.Command;
 import java.util.List;
 
@@ -12,8 +11,8 @@ final class Header {
 
   private Header() {}
 
-  static void write(Sheet sheet, List<Command> commands) {
-    for (String line : Preload.imports()) {
+  static void write(Sheet sheet, List<Command> commands, List<String> preload) {
+    for (String line : preload) {
       sheet.add("import " + line + "; ");
     }
     for (Command command : commands) {

@@ -42,13 +42,15 @@ final class TypePass {
 
   private final Workbook workbook;
   private final List<Command> commands;
+  private final List<String> preload;
   private final Sheet sheet;
   private final Map<Integer, List<Variable>> found = new TreeMap<>();
   private Trees trees;
   private SourcePositions positions;
   private Javac.Pass pass;
 
-  TypePass(Workbook workbook, List<Command> commands) {
+  TypePass(Workbook workbook, List<Command> commands, List<String> preload) {
+    this.preload = preload;
     this.workbook = workbook;
     this.commands = commands;
     this.sheet = new Sheet(workbook);
@@ -75,7 +77,7 @@ final class TypePass {
   }
 
   private void write() {
-    Header.write(sheet, commands);
+    Header.write(sheet, commands, preload);
     sheet.add("class " + Header.OWNER + " {\n");
     for (Command command : commands) {
       if (command.kind() == Command.Kind.TYPE || command.kind() == Command.Kind.METHOD) {

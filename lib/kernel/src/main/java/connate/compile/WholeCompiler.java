@@ -1,5 +1,6 @@
 package connate.compile;
 
+import connate.protocol.Preload;
 import connate.protocol.Request;
 import connate.workbook.Command;
 import connate.workbook.Workbook;
@@ -34,6 +35,7 @@ public final class WholeCompiler {
   private final Workbook workbook;
   private final Javac javac;
   private final Complaint complaint;
+  private final List<String> preload;
   private List<Command> commands;
   private Problem problem;
 
@@ -42,6 +44,7 @@ public final class WholeCompiler {
     this.javac = new Javac(classPath);
     this.complaint = new Complaint(workbook);
     this.commands = workbook.commands();
+    this.preload = Preload.imports(classPath);
   }
 
   /** Compiles a workbook against a class path. */
@@ -59,7 +62,7 @@ public final class WholeCompiler {
       return Compilation.commandByCommand("an import stands after other commands");
     }
     while (true) {
-      TypePass types = new TypePass(workbook, commands);
+      TypePass types = new TypePass(workbook, commands, preload);
       Javac.Pass first = types.run(javac);
       if (!first.isParsed()) {
         cut(first, first.errors().get(0));
@@ -74,7 +77,7 @@ public final class WholeCompiler {
 
   /** Compiles the commands whose types are known; {@code null} after a cut. */
   private Compilation compile(Map<Integer, List<Variable>> variables) {
-    CodePass code = new CodePass(workbook, commands, variables);
+    CodePass code = new CodePass(workbook, commands, variables, preload);
     if (!code.clash().isEmpty()) {
       return Compilation.commandByCommand(code.clash());
     }

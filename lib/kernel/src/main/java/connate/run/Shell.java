@@ -59,7 +59,7 @@ public final class Shell implements AutoCloseable {
             .build();
     control.expect(-1, event -> {});
     shell.eval(
-        Preload.imports().stream()
+        Preload.imports(EngineProcess.classPath()).stream()
             .map(line -> "import " + line + ";")
             .collect(Collectors.joining(" ")));
   }

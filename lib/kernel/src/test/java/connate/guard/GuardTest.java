@@ -97,7 +97,7 @@ class GuardTest {
         "Listening.quietly(() -> 1)",
         "connate.engine.Rendering.of(\"a\", 1)",
         "connate.engine.Checkpoint.pass();",
-        "connate.protocol.Preload.imports()",
+        "connate.protocol.Preload.imports(\"\")",
         "new connate.protocol.Channel(null, null);",
         "connate.file.AtomicFile.write(null, null);",
         "Well.read(java.nio.file.Path.of(\"x\"))",
