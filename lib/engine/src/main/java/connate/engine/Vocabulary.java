@@ -144,4 +144,9 @@ public final class Vocabulary {
   public static Sampling seed() {
     return Sampling.seed(session().seed());
   }
+
+  /** Returns draws from a seed of the workbook's own. */
+  public static Sampling seed(long number) {
+    return Sampling.seed(number);
+  }
 }

@@ -46,8 +46,8 @@ class RenderingTest {
   }
 
   @Test
-  void numbersHaveTenDigits() {
-    assertEquals("0.3333333333", text(1.0 / 3));
+  void numbersHaveFourDigits() {
+    assertEquals("0.3333", text(1.0 / 3));
     assertEquals("1.1", text(1.1f));
     assertEquals("3", text(3L));
     assertEquals("missing", text(Double.NaN));
