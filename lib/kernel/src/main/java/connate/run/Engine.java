@@ -60,6 +60,7 @@ final class Engine implements AutoCloseable {
    * {@link Event.Failed}.
    */
   Event invoke(Request.Invoke invoke, Consumer<Event> told) {
+    stopping = false;
     try {
       send(invoke);
       running = invoke.command();
