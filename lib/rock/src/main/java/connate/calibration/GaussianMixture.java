@@ -210,8 +210,12 @@ public final class GaussianMixture implements Listed {
       double[] second = new double[w.length];
       double likelihood = 0;
       double[] share = new double[w.length];
+      double[] constant = new double[w.length];
+      for (int j = 0; j < w.length; j++) {
+        constant[j] = StrictMath.log(w[j]) - StrictMath.log(s[j]) - HALF_LOG_TWO_PI;
+      }
       for (double value : x) {
-        likelihood += share(value, share);
+        likelihood += share(value, constant, share);
         for (int j = 0; j < w.length; j++) {
           double d = value - m[j];
           sum[j] += share[j];
@@ -228,10 +232,11 @@ public final class GaussianMixture implements Listed {
       return likelihood;
     }
 
-    private double share(double value, double[] share) {
+    private double share(double value, double[] constant, double[] share) {
       double top = Double.NEGATIVE_INFINITY;
       for (int j = 0; j < w.length; j++) {
-        share[j] = logDensity(value, w[j], m[j], s[j]);
+        double z = (value - m[j]) / s[j];
+        share[j] = constant[j] - z * z / 2;
         top = Math.max(top, share[j]);
       }
       double sum = 0;

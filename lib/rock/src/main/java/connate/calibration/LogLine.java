@@ -65,6 +65,24 @@ final class LogLine {
     return intercept + slope * x;
   }
 
+  /**
+   * Returns the root mean square of the errors when each plug in turn is left out, without fitting
+   * anew: by the hat matrix, or by the mean of the others where only the offset is fitted.
+   */
+  double leaveOneOut() {
+    int n = residuals.length;
+    double sum = 0;
+    if (squares != null) {
+      sum = squares.press();
+    } else {
+      for (double e : residuals) {
+        double out = e * n / (n - 1);
+        sum += out * out;
+      }
+    }
+    return StrictMath.sqrt(sum / n);
+  }
+
   double predictionHalfWidth(double level, double x) {
     if (squares != null) {
       return squares.predictionHalfWidth(level, x);

@@ -101,7 +101,7 @@ public final class TransformFit implements Curve, Listed {
 
   /** Returns the root mean square of the errors when each plug in turn is left out of the fit. */
   public Ratio leaveOneOut() {
-    return Units.decades(LeaveOut.each().error(form, plugs));
+    return Units.decades(line.leaveOneOut());
   }
 
   /** Returns the root mean square of the errors when each group in turn is left out of the fit. */

@@ -73,6 +73,21 @@ class LogLinearTest {
         1e-12);
   }
 
+  /** Independent: the closed form of leaving one plug out equals fitting anew without it. */
+  @Test
+  void leavingOneOutEqualsFittingAnew() {
+    Series phi = porosity(8, 12, 17, 24, 28, 14, 10, 21);
+    Series k = Series.of("k", Units.mD, 0.3, 2, 5, 80, 300, 1, 2, 30);
+    Plugs plugs = Plugs.of(phi, k, x -> x);
+    for (var form : java.util.List.of(LogLinear.FORM, connate.permeability.KozenyCarman.FORM)) {
+      assertEquals(
+          LeaveOut.each().error(form, plugs),
+          TransformFit.of(form, phi, k).leaveOneOut().value(),
+          1e-12,
+          form.name());
+    }
+  }
+
   @Test
   void zerosAndBlanksAreCounted() {
     TransformFit fit =
