@@ -32,7 +32,8 @@ public final class Main {
     System.exit(run(arguments));
   }
 
-  static int run(String... arguments) {
+  /** Runs the command that the arguments name and returns its exit status. */
+  public static int run(String... arguments) {
     String first = arguments.length == 0 ? "--help" : arguments[0];
     if (first.equals("--help") || first.equals("-h")) {
       System.out.println(Help.text());

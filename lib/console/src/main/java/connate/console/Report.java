@@ -55,10 +55,10 @@ final class Report {
 
   /** Says how the replay ended and returns the exit status. */
   int ending(ReplayOutcome outcome, Path written) {
-    for (String unused : outcome.unused()) {
-      err.println("connate: no command assumes «" + unused + "»" + Help.near(unused, assumed()));
-    }
     if (outcome.kind() == ReplayOutcome.Kind.COMPLETED) {
+      for (String unused : outcome.unused()) {
+        err.println("connate: no command assumes «" + unused + "»" + Help.near(unused, assumed()));
+      }
       return outcome.unused().isEmpty() ? Exit.DONE : Exit.USAGE;
     }
     err.println(words(outcome));
@@ -82,13 +82,22 @@ final class Report {
     if (outcome.command() == null || message.startsWith(log.workbook().name() + ":")) {
       return message;
     }
-    return log.workbook().name()
-        + ":"
-        + outcome.command().firstLine()
-        + ":"
-        + outcome.command().column()
-        + ": error: "
-        + message;
+    return place(outcome) + ": error: " + message;
+  }
+
+  /**
+   * The line of the command in which it went wrong, where the stack tells; else where it begins.
+   */
+  private String place(ReplayOutcome outcome) {
+    String name = log.workbook().name();
+    int first = outcome.command().firstLine();
+    int line =
+        outcome.failure().frames().stream()
+            .filter(f -> f.file().equals(name) && f.line() >= first)
+            .mapToInt(Event.Frame::line)
+            .findFirst()
+            .orElse(first);
+    return line == first ? name + ":" + line + ":" + outcome.command().column() : name + ":" + line;
   }
 
   private static String value(ReplayLog.Of<Event.Kept> of) {

@@ -56,7 +56,7 @@ final class Cells {
   /** Returns the number that the whole cell is, NaN where it is none. */
   static double number(String cell, boolean decimalComma) {
     String text = decimalComma ? cell.replace(',', '.') : cell;
-    if (connate.quantity.Numbers.end(text) != text.length()) {
+    if (text.isEmpty() || connate.quantity.Numbers.end(text) != text.length()) {
       return Double.NaN;
     }
     return Double.parseDouble(text);

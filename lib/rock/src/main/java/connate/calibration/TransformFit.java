@@ -56,6 +56,7 @@ public final class TransformFit implements Curve, Listed {
     Plugs plugs = Plugs.of(porosity, permeability, form.function());
     Listening.used(form.card());
     plugs.tellDropped(form.card().id());
+    Replicates.warn(permeability);
     return new TransformFit(form, plugs);
   }
 
