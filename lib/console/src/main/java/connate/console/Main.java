@@ -34,7 +34,10 @@ public final class Main {
 
   /** Runs the command that the arguments name and returns its exit status. */
   public static int run(String... arguments) {
-    String first = arguments.length == 0 ? "--help" : arguments[0];
+    if (arguments.length == 0 || ConsoleArguments.isFor(arguments[0])) {
+      return Console.run(arguments);
+    }
+    String first = arguments[0];
     if (first.equals("--help") || first.equals("-h")) {
       System.out.println(Help.text());
       return Exit.DONE;

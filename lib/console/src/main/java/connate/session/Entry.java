@@ -16,6 +16,7 @@ record Entry(Kind kind, int number, String text) {
     FAILED('!'),
     UNDONE('-'),
     SAVED('s'),
+    FOLDER('@'),
     CLOSED('.');
 
     private final char mark;

@@ -75,6 +75,11 @@ public final class Journal implements AutoCloseable {
     write(new Entry(Entry.Kind.SAVED, 0, workbook.toString()));
   }
 
+  /** Writes down in which folder the session's files lie. */
+  public synchronized void in(Path folder) {
+    write(new Entry(Entry.Kind.FOLDER, 0, folder.toString()));
+  }
+
   /** Ends the journal of a session that the user left; it is not offered again. */
   public synchronized void end() {
     write(new Entry(Entry.Kind.CLOSED, 0, ""));

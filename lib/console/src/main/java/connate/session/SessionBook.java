@@ -1,9 +1,11 @@
 package connate.session;
 
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.stream.Collectors;
 
 /**
@@ -13,6 +15,9 @@ import java.util.stream.Collectors;
 public final class SessionBook {
 
   private final Map<Integer, Line> lines = new LinkedHashMap<>();
+  private String folder = "";
+  private Path file;
+  private String savedText = "";
 
   /** What became of something typed. */
   enum State {
@@ -33,8 +38,10 @@ public final class SessionBook {
         case WORKED -> book.worked(entry.number());
         case FAILED -> book.failed(entry.number());
         case UNDONE -> book.undone(entry.number());
-        default -> {
-          // saved and closed change nothing of what was typed
+        case FOLDER -> book.folder = entry.text();
+        case SAVED -> book.saved(Path.of(entry.text()));
+        case CLOSED -> {
+          // changes nothing of what was typed
         }
       }
     }
@@ -59,6 +66,40 @@ public final class SessionBook {
   /** Notes that it was undone. */
   public void undone(int number) {
     set(number, State.UNDONE);
+  }
+
+  /** Notes that the session was saved as a workbook. */
+  public void saved(Path workbook) {
+    file = workbook;
+    savedText = workbook();
+  }
+
+  /** Returns the workbook file that the session was saved as or opened from. */
+  public Optional<Path> file() {
+    return Optional.ofNullable(file);
+  }
+
+  /** Returns whether something worked since the session was saved. */
+  public boolean isUnsaved() {
+    return !workbook().equals(savedText);
+  }
+
+  /** Returns the folder in which the session's files lie, where it is known. */
+  public Optional<Path> folder() {
+    return folder.isEmpty() ? Optional.empty() : Optional.of(Path.of(folder));
+  }
+
+  /** Returns the numbers of what worked, prose included, in order. */
+  public List<Integer> workedNumbers() {
+    return lines.entrySet().stream()
+        .filter(e -> e.getValue().state() == State.WORKED)
+        .map(Map.Entry::getKey)
+        .toList();
+  }
+
+  /** Returns whether a text is prose alone. */
+  public boolean isProse(int number) {
+    return isProse(text(number));
   }
 
   /** Returns the number of the last command that worked, 0 for none. */

@@ -17,6 +17,7 @@ final class Splitting {
   private List<Token> prose = new ArrayList<>();
   private int count;
   private int done;
+  private boolean open;
 
   private Splitting(String text) {
     this.text = text;
@@ -39,6 +40,13 @@ final class Splitting {
     return new Splitting(text).split();
   }
 
+  /** Returns whether a text ends before its last command does. */
+  static boolean isOpen(String text) {
+    Splitting splitting = new Splitting(text);
+    splitting.split();
+    return splitting.open;
+  }
+
   private List<Step> split() {
     Grammar grammar = new Grammar(code, afterProse);
     int from = 0;
@@ -50,6 +58,7 @@ final class Splitting {
       } else {
         int end = grammar.commandEnd(from);
         boolean whole = end > from;
+        open = end == Grammar.OPEN;
         int next = whole ? end : end == Grammar.OPEN ? openEnd(from) : lineEnd(from);
         add(from, next, whole ? grammar.kind() : Command.Kind.UNFINISHED);
         from = next;

@@ -52,6 +52,21 @@ public final class Workbook {
     return new Workbook(name, folder.toAbsolutePath().normalize(), plain(text));
   }
 
+  /** Returns whether a text ends in the middle of a command, so that more must follow. */
+  public static boolean isOpen(String text) {
+    String plain = plain(text);
+    return hasOpenBlock(plain) || Splitting.isOpen(plain);
+  }
+
+  /** Returns whether a text block begins that no three quotes close. */
+  private static boolean hasOpenBlock(String text) {
+    List<Token> tokens = Lexer.tokens(text);
+    String last = tokens.isEmpty() ? "" : tokens.get(tokens.size() - 1).text();
+    boolean closed = last.length() >= 6 && last.endsWith("\"\"\"");
+    boolean comment = last.startsWith("/*") && !last.endsWith("*/");
+    return comment || last.startsWith("\"\"\"") && !closed;
+  }
+
   private static String plain(String raw) {
     String text = raw.startsWith("\uFEFF") ? raw.substring(1) : raw;
     return text.indexOf('\r') < 0 ? text : text.replace("\r\n", "\n").replace('\r', '\n');
