@@ -244,7 +244,6 @@ public final class Console {
   private void open(Path folder, Journal journal, SessionBook book) {
     String name = book.file().map(f -> f.getFileName().toString()).orElse("typed");
     Evaluator evaluator = Evaluator.open(name, folder, settings);
-    evaluator.warm();
     desk = new Desk(screen, printer, folder, evaluator, journal, book);
     housework = new Housework(screen, printer, desk, settings, this::reopen);
   }

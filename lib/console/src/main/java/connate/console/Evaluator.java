@@ -6,6 +6,7 @@ import connate.run.Shell;
 import java.nio.file.Path;
 import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.CompletionException;
+import java.util.concurrent.locks.ReentrantLock;
 import java.util.function.Consumer;
 import java.util.function.Supplier;
 import jdk.jshell.SourceCodeAnalysis;
@@ -21,6 +22,7 @@ final class Evaluator implements AutoCloseable {
   private final Supplier<Shell> shells;
   private CompletableFuture<Shell> shell;
   private volatile Shell running;
+  private final ReentrantLock using = new ReentrantLock();
   private int count;
 
   private Evaluator(Supplier<Shell> shells) {
@@ -39,7 +41,9 @@ final class Evaluator implements AutoCloseable {
         new Thread(
             () -> {
               try {
-                opened.complete(shells.get());
+                Shell made = shells.get();
+                opened.complete(made);
+                warm(made);
               } catch (RuntimeException | Error e) {
                 opened.completeExceptionally(e);
               }
@@ -58,6 +62,7 @@ final class Evaluator implements AutoCloseable {
     Shell ready = ready();
     count++;
     running = ready;
+    using.lock();
     try {
       boolean[] heard = {false};
       Shell.Result result =
@@ -72,6 +77,7 @@ final class Evaluator implements AutoCloseable {
       boolean died = result.last() instanceof Event.Failed f && f.kind().equals(DIED);
       return died && !heard[0] ? ready.run(count, 1, source, told) : result;
     } finally {
+      using.unlock();
       running = null;
     }
   }
@@ -104,18 +110,24 @@ final class Evaluator implements AutoCloseable {
 
   /** Returns what completes and explains half-typed commands. */
   SourceCodeAnalysis analysis() {
-    return ready().analysis();
+    SourceCodeAnalysis analysis = ready().analysis();
+    using.lock();
+    using.unlock();
+    return analysis;
   }
 
-  /** Does once and unseen what the first key for a completion would have to wait for. */
-  void warm() {
-    shell.thenAccept(
-        s -> {
-          Thread thread =
-              new Thread(() -> s.analysis().completionSuggestions("Uni", 3, new int[1]), "warmth");
-          thread.setDaemon(true);
-          thread.start();
-        });
+  /**
+   * Does once and unseen what the first key for a completion would have to wait for, unless a
+   * command is quicker. The compiler behind the shell serves one at a time.
+   */
+  private void warm(Shell opened) {
+    if (using.tryLock()) {
+      try {
+        opened.analysis().completionSuggestions("Uni", 3, new int[1]);
+      } finally {
+        using.unlock();
+      }
+    }
   }
 
   @Override

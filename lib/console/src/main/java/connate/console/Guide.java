@@ -110,7 +110,7 @@ final class Guide {
                     + c.id()
                     + " ".repeat(widest - c.id().length() + 2)
                     + c.title()
-                    + (c.source().isEmpty() ? "" : "  (" + source(c.source()) + ")"))
+                    + (c.source().isEmpty() ? "" : ": " + source(c.source())))
         .toList();
   }
 

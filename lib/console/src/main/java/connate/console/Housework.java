@@ -9,6 +9,7 @@ import connate.record.ReplayLog;
 import connate.run.ReplayOutcome;
 import connate.run.ReplaySettings;
 import connate.text.ItemText;
+import connate.text.Wrapping;
 import connate.workbook.Command;
 import connate.workbook.Workbook;
 import java.io.UncheckedIOException;
@@ -80,7 +81,7 @@ final class Housework implements Desk.Answering {
   }
 
   private Desk.Next lines(List<String> lines) {
-    lines.forEach(l -> screen.line(ItemText.clean(l)));
+    lines.forEach(l -> Wrapping.of(ItemText.clean(l), screen.width()).forEach(screen::line));
     return Desk.Next.GO_ON;
   }
 

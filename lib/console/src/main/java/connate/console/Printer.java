@@ -13,6 +13,7 @@ import java.util.Optional;
 final class Printer {
 
   private static final int SHORT = 60;
+  private static final int BRIEF = 3;
   private static final long AFTER_NANOS = 400_000_000L;
 
   private final Screen screen;
@@ -62,7 +63,6 @@ final class Printer {
 
   private void input(Event.InputRead read) {
     screen.line(screen.ink().faint("read " + ItemText.clean(read.path()) + ", " + rows(read)));
-    read.mapping().forEach(m -> screen.line(screen.ink().faint("  " + ItemText.clean(m))));
   }
 
   static String rows(Event.InputRead read) {
@@ -77,8 +77,17 @@ final class Printer {
     }
   }
 
+  /** Returns the head of a table that was given a name: enough to see that it is the right one. */
+  private static Item brief(Item item) {
+    if (item instanceof Item.Grid grid && grid.rows().size() > BRIEF) {
+      List<List<String>> first = grid.rows().subList(0, BRIEF);
+      return new Item.Grid(grid.caption(), grid.heads(), first, grid.total(), List.of());
+    }
+    return item;
+  }
+
   private void item(String name, Item item) {
-    List<String> lines = screen.setter().lines(item);
+    List<String> lines = screen.setter().lines(name.isEmpty() ? item : brief(item));
     if (name.isEmpty() || item instanceof Item.Grid || item instanceof Item.Group) {
       lines.forEach(screen::line);
     } else if (lines.size() == 1 && lines.get(0).length() <= SHORT) {

@@ -40,8 +40,11 @@ final class Suggestions implements Completer {
 
   @Override
   public void complete(LineReader reader, ParsedLine line, List<Candidate> candidates) {
-    for (String value : values(Typing.of(line.line(), line.cursor()))) {
-      candidates.add(new Candidate(value, value, null, null, null, null, false));
+    Typing typing = Typing.of(line.line(), line.cursor());
+    boolean closes = typing.text() && !line.line().startsWith("\"", line.cursor());
+    for (String value : values(typing)) {
+      String whole = closes && !value.endsWith("/") ? value + "\"" : value;
+      candidates.add(new Candidate(whole, value, null, null, null, null, false));
     }
   }
 

@@ -49,7 +49,12 @@ final class Wrong {
     }
     return nearest(word, source.substring(0, start), analysis)
         .map(n -> "\nhelp: did you mean «" + n + "»?")
-        .orElse("\nhelp: Tab after the first letters shows what there is");
+        .orElse(declares(source, start + word.length(), word));
+  }
+
+  private static String declares(String source, int after, String word) {
+    boolean assigned = source.substring(after).stripLeading().matches("(?s)=[^=].*");
+    return assigned ? "\nhelp: a new name begins with var: var " + word + " = …" : "";
   }
 
   /** Asks what could stand there and takes the nearest. */
@@ -66,7 +71,7 @@ final class Wrong {
       Optional<String> found =
           names.stream()
               .filter(n -> !n.equals(word))
-              .filter(n -> Help.distance(n, word) <= Math.max(1, word.length() / 3))
+              .filter(n -> Help.distance(n, word) <= word.length() / 3)
               .min(Comparator.comparingInt(n -> Help.distance(n, word)));
       if (found.isPresent()) {
         return found;

@@ -40,10 +40,21 @@ public final class ItemText {
     }
   }
 
+  /** A sketch has title and notes already; a picture without one shows them alone. */
   private void addPicture(List<String> out, Item.Picture picture) {
-    out.add(ink.strong(clean(picture.title())));
-    clean(picture.sketch()).lines().forEach(out::add);
-    picture.notes().forEach(note -> out.add(ink.faint(clean(note))));
+    String title = clean(picture.title());
+    List<String> sketch = clean(picture.sketch()).lines().toList();
+    out.add(ink.strong(title));
+    boolean titled = !sketch.isEmpty() && sketch.get(0).strip().equals(title.strip());
+    sketch.stream().skip(titled ? 1 : 0).forEach(out::add);
+    picture.notes().stream()
+        .map(ItemText::clean)
+        .filter(note -> sketch.stream().noneMatch(line -> line.strip().equals(note.strip())))
+        .forEach(note -> addFaint(out, note));
+  }
+
+  private void addFaint(List<String> out, String text) {
+    Wrapping.of(text, width).forEach(line -> out.add(ink.faint(line)));
   }
 
   private void addGrid(List<String> out, Item.Grid grid) {
@@ -59,7 +70,7 @@ public final class ItemText {
     }
     grid.rows().forEach(row -> out.add(line(grid, row, widths, columns)));
     addCuts(out, grid, columns);
-    grid.notes().forEach(note -> out.add(ink.faint("  " + clean(note))));
+    grid.notes().forEach(note -> addFaint(out, "  " + clean(note)));
   }
 
   /** Says what does not fit: columns to the right, rows below. */
