@@ -16,8 +16,7 @@ record Call(String name, Optional<String> argument) {
 
   /** The names that the console answers to. */
   static final List<String> NAMES =
-      List.of(
-          "help", "methods", "inputs", "results", "undo", "save", "open", "log", "why", "quit");
+      List.of("help", "methods", "inputs", "results", "undo", "save", "open", "log", "why", "quit");
 
   private static final Pattern FORM =
       Pattern.compile("\\s*(\\w+)\\s*\\(\\s*(?:\"((?:[^\"\\\\]|\\\\.)*)\")?\\s*\\)\\s*;?\\s*");

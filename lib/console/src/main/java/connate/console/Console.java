@@ -33,6 +33,7 @@ public final class Console {
   private final ConsoleArguments arguments;
   private final Map<String, String> environment;
   private final Path state;
+  private final Path here;
   private final Journals journals;
   private final ReplaySettings settings;
   private Screen screen;
@@ -40,7 +41,8 @@ public final class Console {
   private volatile Desk desk;
   private Housework housework;
 
-  private Console(ConsoleArguments arguments, Map<String, String> environment, Path state) {
+  Console(ConsoleArguments arguments, Map<String, String> environment, Path state, Path folder) {
+    this.here = folder;
     this.arguments = arguments;
     this.environment = environment;
     this.state = state;
@@ -64,7 +66,7 @@ public final class Console {
     }
     Map<String, String> environment = System.getenv();
     Path state = StateFolder.of(environment, System.getProperty("user.home"));
-    Console console = new Console(parsed, environment, state);
+    Console console = new Console(parsed, environment, state, Path.of("").toAbsolutePath());
     return isTerminal() ? console.talk(Editor.system()) : console.pipe();
   }
 
@@ -124,7 +126,10 @@ public final class Console {
 
   private String prompt() {
     String name =
-        desk.book().file().map(f -> f.getFileName().toString().replaceFirst("\\.jsh$", "")).orElse("");
+        desk.book()
+            .file()
+            .map(f -> f.getFileName().toString().replaceFirst("\\.jsh$", ""))
+            .orElse("");
     return name + "> ";
   }
 
@@ -158,8 +163,8 @@ public final class Console {
     screen.line("it is back: " + commands(lost.book().worked().size()));
   }
 
-  private static Path home(Journals.Lost lost) {
-    return lost.book().folder().filter(Files::isDirectory).orElse(here());
+  private Path home(Journals.Lost lost) {
+    return lost.book().folder().filter(Files::isDirectory).orElse(here);
   }
 
   private void replayed() {
@@ -235,7 +240,7 @@ public final class Console {
   }
 
   private void begin(Path workbook) {
-    Path folder = workbook == null ? here() : workbook.toAbsolutePath().normalize().getParent();
+    Path folder = workbook == null ? here : workbook.toAbsolutePath().normalize().getParent();
     Journal journal = journals.start(Instant.now(), ProcessHandle.current().pid(), this::warn);
     journal.in(folder);
     open(folder, journal, new SessionBook());
@@ -246,10 +251,6 @@ public final class Console {
     Evaluator evaluator = Evaluator.open(name, folder, settings);
     desk = new Desk(screen, printer, folder, evaluator, journal, book);
     housework = new Housework(screen, printer, desk, settings, this::reopen);
-  }
-
-  private static Path here() {
-    return Path.of("").toAbsolutePath();
   }
 
   /** Ends the session and starts another with the steps of a workbook. */

@@ -11,8 +11,7 @@ import java.nio.file.Path;
  * @param asks whether the console may ask a question
  * @param coloured whether colour is wanted
  */
-record ConsoleArguments(
-    Path workbook, Path data, boolean trusted, boolean asks, boolean coloured) {
+record ConsoleArguments(Path workbook, Path data, boolean trusted, boolean asks, boolean coloured) {
 
   /**
    * Reads the arguments.

@@ -191,7 +191,9 @@ final class Desk {
         book.failed(number);
         journal.failed(number, failed.kind());
         screen.line(
-            screen.ink().caution("caution: this worked before and does not now: " + command.code()));
+            screen
+                .ink()
+                .caution("caution: this worked before and does not now: " + command.code()));
         printer.failed(Wrong.ran(failed));
       }
     }

@@ -142,7 +142,8 @@ final class Editor implements AutoCloseable {
   /** Asks a question that is answered with one letter; Enter says yes. */
   boolean agrees(String question) {
     Optional<String> answer = answer(question);
-    return answer.isPresent() && !answer.get().strip().toLowerCase(java.util.Locale.ROOT).startsWith("n");
+    return answer.isPresent()
+        && !answer.get().strip().toLowerCase(java.util.Locale.ROOT).startsWith("n");
   }
 
   private Optional<String> answer(String question) {

@@ -1,12 +1,14 @@
 package connate.console;
 
 import connate.method.MethodCard;
+import connate.method.MethodCards;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.stream.Stream;
@@ -15,8 +17,6 @@ import java.util.stream.Stream;
 final class Guide {
 
   private static final Map<String, String> WORDS = words();
-
-  private Cards cards;
 
   private static Map<String, String> words() {
     Map<String, String> words = new LinkedHashMap<>();
@@ -81,12 +81,23 @@ final class Guide {
     if (WORDS.containsKey(word)) {
       return List.of("  " + WORDS.get(word));
     }
-    return cards().named(word).stream().flatMap(c -> page(c).lines()).toList();
+    Optional<MethodCard> card = card(word);
+    return card.map(c -> c.toString().lines().toList()).orElse(List.of());
   }
 
-  private String page(MethodCard card) {
-    String owner = cards().owner(card);
-    return card + (owner.isEmpty() ? "" : "\n  In commands: " + owner) + "\n";
+  private static Optional<MethodCard> card(String word) {
+    String wanted = bare(word);
+    return MethodCards.all().stream()
+        .filter(c -> bare(c.id()).equals(wanted) || bare(c.title()).equals(wanted))
+        .findFirst()
+        .or(
+            () ->
+                MethodCards.all().stream().filter(c -> bare(c.id()).startsWith(wanted)).findFirst())
+        .filter(c -> !wanted.isEmpty());
+  }
+
+  private static String bare(String name) {
+    return name.toLowerCase(Locale.ROOT).replaceAll("[^\\p{L}\\p{N}]", "");
   }
 
   /** Returns the nearest name that help knows, as words. */
@@ -96,12 +107,13 @@ final class Guide {
 
   /** Returns all that help knows by name. */
   List<String> topics() {
-    return Stream.concat(WORDS.keySet().stream(), cards().names().stream()).toList();
+    return Stream.concat(WORDS.keySet().stream(), MethodCards.all().stream().map(MethodCard::id))
+        .toList();
   }
 
   /** Returns a line for each method that holds all of some words. */
   List<String> methods(String words) {
-    List<MethodCard> found = words.isBlank() ? cards().all() : cards().about(words);
+    List<MethodCard> found = words.isBlank() ? MethodCards.all() : MethodCards.find(words);
     int widest = found.stream().mapToInt(c -> c.id().length()).max().orElse(0);
     return found.stream()
         .map(
@@ -117,12 +129,5 @@ final class Guide {
   private static String source(String whole) {
     int end = whole.indexOf(')');
     return end > 0 && end < 60 ? whole.substring(0, end + 1) : whole.split("[,.;]", 2)[0];
-  }
-
-  private Cards cards() {
-    if (cards == null) {
-      cards = Cards.find();
-    }
-    return cards;
   }
 }

@@ -179,8 +179,7 @@ final class Housework implements Desk.Answering {
   }
 
   private Desk.Next log(Optional<String> name) {
-    String own =
-        desk.book().file().map(f -> f.getFileName().toString()).orElse("session.jsh");
+    String own = desk.book().file().map(f -> f.getFileName().toString()).orElse("session.jsh");
     Path file = file(name.orElse(own.replaceFirst("\\.jsh$", "") + ".html"), ".html");
     String text = desk.book().workbook();
     ReplayLog log = new ReplayLog(Workbook.parse(own, desk.folder(), text), settings);

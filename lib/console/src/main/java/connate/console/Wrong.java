@@ -18,7 +18,7 @@ final class Wrong {
 
   private static final Pattern PLACE = Pattern.compile("^[^\\n]*?: error\\[\\w+\\]: ");
   private static final Pattern UNKNOWN =
-      Pattern.compile("no (?:variable|type|method) «(\\w+)(?:\\(.*\\))?» is known");
+      Pattern.compile("no [a-z ]+ «(\\w+)(?:\\(.*\\))?» is known");
 
   private Wrong() {}
 
@@ -58,8 +58,7 @@ final class Wrong {
   }
 
   /** Asks what could stand there and takes the nearest. */
-  private static Optional<String> nearest(
-      String word, String before, SourceCodeAnalysis analysis) {
+  private static Optional<String> nearest(String word, String before, SourceCodeAnalysis analysis) {
     for (int letters = Math.min(2, word.length()); letters >= 0; letters--) {
       String asked = before + word.substring(0, letters);
       List<String> names =
