@@ -80,7 +80,7 @@ public final class Console {
   int talk(Terminal terminal) {
     boolean dumb = terminal.getType().startsWith(Terminal.TYPE_DUMB);
     Ink ink = Ink.of(environment, !dumb, arguments.coloured());
-    start(new Screen(terminal.writer(), terminal::getWidth, ink, !dumb));
+    start(new Screen(terminal.writer(), () -> terminal.getSize().getColumns(), ink, !dumb));
     Optional<Journals.Lost> lost = arguments.asks() ? journals.lost() : Optional.empty();
     if (lost.isEmpty()) {
       begin(arguments.workbook());
