@@ -145,17 +145,15 @@ final class Desk {
     if (told && result.last() instanceof Event.Returned returned) {
       printer.returned(returned);
     }
-    return told ? missing(source, result) : null;
+    if (told && !result.unresolved().isEmpty()) {
+      missing(result.unresolved());
+    }
+    return null;
   }
 
-  /** A declaration that needs what is not there yet is no failure where it is a method or type. */
-  private Event.Failed missing(String source, Shell.Result result) {
-    if (result.unresolved().isEmpty()) {
-      return null;
-    }
-    String names = String.join(", ", result.unresolved());
-    screen.line(screen.ink().caution("caution: it needs " + names + ", not declared yet"));
-    return null;
+  /** A method or type may need what is not declared yet; that is no failure. */
+  private void missing(List<String> names) {
+    screen.line(screen.ink().caution("caution: not declared yet: " + String.join(", ", names)));
   }
 
   private void tell(String source, Event.Failed failed, Shell.Result result) {
