@@ -1,69 +1,103 @@
 package connate.table;
 
-import java.util.Locale;
-import java.util.Set;
+import connate.quantity.Numbers;
+import java.util.regex.Pattern;
 
-/** What a cell holds: nothing, a number, a number with its unit, or words. */
+/** What a cell holds: a number, a number with its unit, or words. */
 final class Cells {
 
-  private static final Set<String> NOTHING =
-      Set.of(
-          "",
-          "-",
-          "--",
-          "nan",
-          "na",
-          "n/a",
-          "#n/a",
-          "null",
-          "(null)",
-          "none",
-          "missing",
-          "-999.25",
-          "-999",
-          "-9999",
-          "-9999.25",
-          "-99999",
-          "-999.0",
-          "-9999.0");
+  private static final char MINUS = '\u2212';
+
+  /** The digits that a double holds for certain; a longer name of digits would change. */
+  private static final int EXACT_DIGITS = 15;
+
+  /** Groups of thousands that leave no doubt: two of them, or a decimal sign of another kind. */
+  private static final Pattern BLANK_GROUPS =
+      Pattern.compile("[-+]?[1-9]\\d{0,2}([ \u00a0\u202f'’])\\d{3}(?:\\1\\d{3})*(?:[.,]\\d+)?");
+
+  private static final Pattern COMMA_GROUPS =
+      Pattern.compile("[-+]?[1-9]\\d{0,2}(?:(?:,\\d{3})+\\.\\d+|(?:,\\d{3}){2,})");
+  private static final Pattern POINT_GROUPS =
+      Pattern.compile("[-+]?[1-9]\\d{0,2}(?:(?:\\.\\d{3})+,\\d+|(?:\\.\\d{3}){2,})");
+  private static final Pattern ONE_COMMA_GROUP = Pattern.compile("[-+]?[1-9]\\d{0,2},\\d{3}");
+  private static final Pattern ONE_POINT_GROUP = Pattern.compile("[-+]?[1-9]\\d{0,2}\\.\\d{3}");
 
   private Cells() {}
 
-  static boolean isMissing(String cell) {
-    if (cell.isEmpty()) {
-      return true;
-    }
-    String low = cell.toLowerCase(Locale.ROOT);
-    return NOTHING.contains(low) || low.startsWith("-999") && NOTHING.contains(trimmed(low));
-  }
-
-  /** -999.2500 and -9999.00 say the same as without their last zeros. */
-  private static String trimmed(String number) {
-    String out = number;
-    while (out.contains(".") && out.endsWith("0")) {
-      out = out.substring(0, out.length() - 1);
-    }
-    return out.endsWith(".") ? out.substring(0, out.length() - 1) : out;
-  }
-
-  /** Returns whether the cell is an identifier such as 00123, whose zeros would be lost. */
-  static boolean isPadded(String cell) {
-    return cell.length() > 1
-        && cell.charAt(0) == '0'
-        && cell.chars().allMatch(c -> c >= '0' && c <= '9');
-  }
-
   /** Returns the number that the whole cell is, NaN where it is none. */
   static double number(String cell, boolean decimalComma) {
-    String text = decimalComma ? cell.replace(',', '.') : cell;
-    if (text.isEmpty() || connate.quantity.Numbers.end(text) != text.length()) {
+    if (cell.isEmpty() || !isStart(cell.charAt(0))) {
       return Double.NaN;
     }
-    return Double.parseDouble(text);
+    String text = cell.charAt(0) == MINUS ? '-' + cell.substring(1) : cell;
+    String plain = decimalComma ? swapped(text) : text;
+    if (Numbers.end(plain) != plain.length()) {
+      return grouped(text, decimalComma);
+    }
+    double value = Double.parseDouble(plain);
+    return Double.isInfinite(value) ? Double.NaN : value;
+  }
+
+  private static boolean isStart(char c) {
+    return c >= '0' && c <= '9' || c == '-' || c == '+' || c == '.' || c == ',' || c == MINUS;
+  }
+
+  /** Turns a decimal comma into a point; a point then stands for no decimal sign. */
+  private static String swapped(String text) {
+    return text.indexOf('.') >= 0 ? text.replace('.', '\'') : text.replace(',', '.');
+  }
+
+  private static double grouped(String text, boolean decimalComma) {
+    boolean fits =
+        BLANK_GROUPS.matcher(text).matches()
+            ? text.indexOf(decimalComma ? '.' : ',') < 0
+            : (decimalComma ? POINT_GROUPS : COMMA_GROUPS).matcher(text).matches();
+    if (!fits) {
+      return Double.NaN;
+    }
+    String bare = text.replaceAll(decimalComma ? "[ \u00a0\u202f'’.]" : "[ \u00a0\u202f'’,]", "");
+    return Double.parseDouble(bare.replace(',', '.'));
+  }
+
+  /** Returns whether a cell such as {@code 1,234} may be a thousand or a decimal. */
+  static boolean isDoubtful(String cell, boolean decimalComma) {
+    return (decimalComma ? ONE_POINT_GROUP : ONE_COMMA_GROUP).matcher(cell).matches();
+  }
+
+  /** Returns whether the cell is a name of digits, such as 00123, that a number would not keep. */
+  static boolean isDigitsName(String cell) {
+    boolean padded = cell.length() > 1 && cell.charAt(0) == '0';
+    if (!padded && cell.length() <= EXACT_DIGITS) {
+      return false;
+    }
+    return cell.chars().allMatch(c -> c >= '0' && c <= '9');
+  }
+
+  /** Returns whether a cell names a bound of detection, such as {@code <0.01}. */
+  static boolean isBound(String cell, boolean decimalComma) {
+    return cell.length() > 1
+        && (cell.charAt(0) == '<' || cell.charAt(0) == '>')
+        && numberEnd(cell.substring(1).strip(), decimalComma) > 0;
   }
 
   /** Returns where the number ends with which a cell such as {@code 12 mD} begins; 0 for none. */
   static int numberEnd(String cell, boolean decimalComma) {
-    return connate.quantity.Numbers.end(decimalComma ? cell.replace(',', '.') : cell);
+    return Numbers.end(decimalComma ? cell.replace(',', '.') : cell);
+  }
+
+  /**
+   * Returns what a cell says about the decimal sign: 1 for a comma, -1 for a point, 0 for nothing.
+   */
+  static int decimalSign(String cell) {
+    int comma = cell.indexOf(',');
+    int point = cell.indexOf('.');
+    if (comma < 0) {
+      return point >= 0 && !Double.isNaN(number(cell, false)) ? -1 : 0;
+    }
+    if (point >= 0) {
+      boolean known = !Double.isNaN(number(cell, comma > point));
+      return !known ? 0 : comma > point ? 1 : -1;
+    }
+    return isDoubtful(cell, false) || Double.isNaN(number(cell, true)) ? 0 : 1;
   }
 }

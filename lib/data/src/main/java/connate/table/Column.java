@@ -1,5 +1,6 @@
 package connate.table;
 
+import connate.quantity.Numbers;
 import connate.series.Labels;
 import connate.series.Series;
 import java.util.Optional;
@@ -66,9 +67,6 @@ record Column(Series numbers, Labels words) {
     if (numbers == null) {
       return words.label(row);
     }
-    double value = numbers.value(row);
-    return value == StrictMath.rint(value) && Math.abs(value) < 1e15
-        ? Long.toString((long) value)
-        : Double.toString(value);
+    return Numbers.full(numbers.value(row));
   }
 }

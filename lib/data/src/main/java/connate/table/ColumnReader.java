@@ -1,10 +1,6 @@
 package connate.table;
 
 import connate.fault.Fault;
-import connate.method.Caution;
-import connate.method.Listening;
-import connate.quantity.Fraction;
-import connate.quantity.Numbers;
 import connate.quantity.Unit;
 import connate.quantity.Units;
 import connate.role.Role;
@@ -12,14 +8,14 @@ import connate.role.Roles;
 import connate.series.Labels;
 import connate.series.Series;
 import connate.series.Unstated;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 
 /**
- * Decides whether a column holds numbers or words. It holds numbers where four of five cells that
- * are not empty are numbers; the others are then faults, told with their places.
+ * Decides whether a column holds numbers or words. It holds numbers where its heading names a unit
+ * or where four of five cells that are not empty are numbers; the others are then faults, told with
+ * their places.
  */
 final class ColumnReader {
 
@@ -30,106 +26,115 @@ final class ColumnReader {
   private final Heading heading;
   private final List<Sheet.Row> rows;
   private final int column;
-  private final List<Fault> faults = new ArrayList<>();
+  private final Faults faults;
+  private final ColumnScan scan;
+  private final CellUnits units;
+  private final ColumnLooks looks;
 
-  ColumnReader(Sheet sheet, Heading heading, List<Sheet.Row> rows, int column) {
+  ColumnReader(Sheet sheet, Heading heading, List<Sheet.Row> rows, int column, Faults faults) {
     this.sheet = sheet;
     this.heading = heading;
     this.rows = rows;
     this.column = column;
-  }
-
-  List<Fault> faults() {
-    return faults;
+    this.faults = faults;
+    this.scan = new ColumnScan(sheet, rows, column);
+    this.units = new CellUnits(heading, scan.decimalComma());
+    this.looks = new ColumnLooks(sheet.file(), heading.name(), rows);
   }
 
   Column read() {
-    int filled = 0;
-    int numbers = 0;
-    int withUnit = 0;
-    boolean padded = false;
-    for (Sheet.Row row : rows) {
-      String cell = row.cell(column);
-      if (!Cells.isMissing(cell)) {
-        filled++;
-        padded |= Cells.isPadded(cell);
-        if (!Double.isNaN(number(cell))) {
-          numbers++;
-        } else if (unitOf(cell).isPresent()) {
-          withUnit++;
-        }
-      }
+    int[] odd = scan.odd();
+    int measured = 0;
+    int doubtful = 0;
+    for (int row : odd) {
+      measured += units.of(scan.cell(row)).isPresent() ? 1 : 0;
+      doubtful += isNearNumber(scan.cell(row)) ? 1 : 0;
     }
-    boolean named = role().map(r -> WORDS.contains(r.name())).orElse(false);
-    boolean words = padded || named && heading.symbol().isEmpty();
-    if (words
-        || numbers + withUnit < GREAT_MAJORITY * filled
-        || filled == 0 && heading.symbol().isEmpty()) {
-      return Column.of(words(numbers, filled, words));
-    }
-    return Column.of(numbers(withUnit));
+    boolean meant = isNamedWords();
+    boolean majority =
+        scan.numbers() + measured + doubtful >= GREAT_MAJORITY * scan.filled() && scan.filled() > 0;
+    boolean numeric = hasUnit() || !meant && (majority || scan.filled() == 0);
+    return numeric ? Column.of(numbers(odd, measured)) : Column.of(words(meant));
+  }
+
+  private boolean isNearNumber(String cell) {
+    return Cells.isDoubtful(cell, scan.decimalComma()) || Cells.isBound(cell, scan.decimalComma());
+  }
+
+  private boolean hasUnit() {
+    return !heading.unit().equals(Unstated.UNIT);
+  }
+
+  /** Names of wells, zones and facies are words, also where they are written in digits. */
+  private boolean isNamedWords() {
+    boolean role = role().map(r -> WORDS.contains(r.name())).orElse(false);
+    return scan.isDigitsName() || role && !scan.isBroken();
   }
 
   private Optional<Role> role() {
     return Roles.find(heading.name(), heading.symbol());
   }
 
-  private double number(String cell) {
-    return Cells.number(cell, sheet.decimalComma());
-  }
-
-  private Labels words(int numbers, int filled, boolean meant) {
-    if (!meant && numbers > 0 && numbers > filled / 5) {
-      Listening.caution(
-          Caution.of(
-              "T23",
-              sheet.file(),
-              sheet.file()
-                  + ": «"
-                  + heading.name()
-                  + "» was read as words, though "
-                  + numbers
-                  + " of its "
-                  + filled
-                  + " cells are numbers"));
+  private Labels words(boolean meant) {
+    boolean wanted = role().map(r -> r.unit() != null).orElse(false);
+    if (!meant && (wanted || scan.numbers() > scan.filled() / 5)) {
+      looks.words(scan.numbers(), scan.filled());
     }
     String[] words = new String[rows.size()];
     for (int row = 0; row < words.length; row++) {
-      String cell = rows.get(row).cell(column);
-      words[row] = cell.isEmpty() ? null : cell;
+      String cell = scan.cell(row);
+      words[row] = Missing.isNoWord(cell) ? null : cell;
     }
     return Labels.of(heading.name(), words);
   }
 
-  private Series numbers(int withUnit) {
-    Unit<?> unit = withUnit > 0 && heading.symbol().isEmpty() ? firstUnit() : heading.unit();
-    double[] values = new double[rows.size()];
-    for (int row = 0; row < values.length; row++) {
-      String cell = rows.get(row).cell(column);
-      values[row] = Cells.isMissing(cell) ? Double.NaN : value(rows.get(row), cell, unit);
+  private Series numbers(int[] odd, int measured) {
+    boolean own = measured > 0 && !hasUnit();
+    Unit<?> unit = own ? firstUnit(odd) : heading.unit();
+    if (own && scan.numbers() > 0) {
+      refuseBare();
     }
+    double[] values = scan.values();
+    for (int row : odd) {
+      values[row] = value(row, unit);
+    }
+    looks.mark(values, scan);
     checkFractions(values, unit);
-    return Series.over(heading.name(), unit, values, null);
+    Series series = Series.over(heading.name(), unit, values, null);
+    looks.range(series, role());
+    return NameTraits.of(series, role());
   }
 
-  private double value(Sheet.Row row, String cell, Unit<?> unit) {
-    double number = number(cell);
-    if (!Double.isNaN(number)) {
-      return number;
-    }
-    Optional<Unit<?>> own = unitOf(cell);
+  private double value(int row, Unit<?> unit) {
+    String cell = scan.cell(row);
+    Optional<Unit<?>> own = units.of(cell);
     if (own.isPresent()) {
-      return converted(row, cell, own.get(), unit);
+      return converted(row, own.get(), unit);
     }
-    fault(
-        row,
-        "T04",
-        "«" + cell + "» stands in «" + heading.name() + "», where a number was expected",
-        "write a number, or leave the cell empty where none was measured");
+    if (Cells.isDoubtful(cell, scan.decimalComma())) {
+      fault(
+          row,
+          "T07",
+          "«" + cell + "» may be a thousand or a decimal in «" + heading.name() + "»",
+          "write it without a sign between thousands, and decimals with a point");
+    } else if (Cells.isBound(cell, scan.decimalComma())) {
+      fault(
+          row,
+          "T08",
+          "«" + cell + "» is a bound of «" + heading.name() + "», where a number was expected",
+          "leave the cell empty, or write the number to reckon with and say so in the prose");
+    } else {
+      fault(
+          row,
+          "T04",
+          "«" + cell + "» stands in «" + heading.name() + "», where a number was expected",
+          "write a number, or leave the cell empty where none was measured");
+    }
     return Double.NaN;
   }
 
-  private double converted(Sheet.Row row, String cell, Unit<?> own, Unit<?> unit) {
+  private double converted(int row, Unit<?> own, Unit<?> unit) {
+    String cell = scan.cell(row);
     if (own.dimension() != unit.dimension()) {
       fault(
           row,
@@ -148,69 +153,59 @@ final class ColumnReader {
       return Double.NaN;
     }
     if (!own.isSame(unit)) {
-      Listening.caution(
-          Caution.of(
-              "T24",
-              sheet.file() + "/" + heading.name() + "/" + own.symbol(),
-              sheet.file()
-                  + ": «"
-                  + heading.name()
-                  + "» mixes units; cells in "
-                  + own.symbol()
-                  + " were converted to "
-                  + unit.symbol()));
+      looks.mixed(own, unit);
     }
-    double number = number(cell.substring(0, Cells.numberEnd(cell, sheet.decimalComma())));
-    return own.convert(number, unit);
+    return own.convert(units.number(cell), unit);
   }
 
-  private Unit<?> firstUnit() {
-    return rows.stream()
-        .map(r -> unitOf(r.cell(column)))
-        .flatMap(Optional::stream)
-        .findFirst()
-        .orElse(Unstated.UNIT);
+  private Unit<?> firstUnit(int... odd) {
+    for (int row : odd) {
+      Optional<Unit<?>> unit = units.of(scan.cell(row));
+      if (unit.isPresent()) {
+        return unit.get();
+      }
+    }
+    return Unstated.UNIT;
   }
 
-  /** Returns the unit behind the number with which a cell begins. */
-  private Optional<Unit<?>> unitOf(String cell) {
-    int end = Cells.numberEnd(cell, sheet.decimalComma());
-    return end == 0 || end == cell.length()
-        ? Optional.empty()
-        : Heading.find(heading.name(), cell.substring(end).strip());
+  /** Where cells name units and the heading none, a bare number may be in any of them. */
+  private void refuseBare() {
+    for (int row = 0; row < rows.size(); row++) {
+      if (!Double.isNaN(scan.values()[row])) {
+        fault(
+            row,
+            "T09",
+            "«"
+                + scan.cell(row)
+                + "» has no unit, where other cells of «"
+                + heading.name()
+                + "» do",
+            "name the unit in the header, such as " + heading.name() + " [mD], or in each cell");
+      }
+    }
   }
 
   /** A stated fraction above 1 is a fault; a stated percentage that never passes 1 a caution. */
   private void checkFractions(double[] values, Unit<?> unit) {
-    if (unit.dimension() != Fraction.DIMENSION) {
-      return;
+    if (unit.equals(Units.percent)) {
+      looks.percent(values);
     }
-    double most = Double.NEGATIVE_INFINITY;
-    for (int row = 0; row < values.length; row++) {
-      double value = values[row];
-      most = Double.isNaN(value) ? most : Math.max(most, value);
-      if (unit.equals(Units.fraction) && value > 1 && faults.size() < 20) {
+    for (int row = 0; unit.equals(Units.fraction) && row < values.length; row++) {
+      if (values[row] > 1) {
         fault(
-            rows.get(row),
+            row,
             "T03",
-            heading.name() + " " + Numbers.text(value) + " is outside 0..1",
+            heading.name() + " " + scan.cell(row) + " is outside 0..1",
             "in percent? name the unit in the header: " + heading.name() + " [%]");
       }
     }
-    if (unit.equals(Units.percent) && most <= 1 && most > 0) {
-      Listening.caution(
-          Caution.of(
-              "T25",
-              sheet.file(),
-              sheet.file()
-                  + ": «"
-                  + heading.name()
-                  + "» is named in % but no value is above 1: are"
-                  + " they fractions?"));
-    }
   }
 
-  private void fault(Sheet.Row row, String code, String message, String help) {
-    faults.add(sheet.fault(row, column, code, message, help));
+  private void fault(int row, String code, String message, String help) {
+    faults.add(() -> fault(rows.get(row), code, message, help));
+  }
+
+  private Fault fault(Sheet.Row row, String code, String message, String help) {
+    return sheet.fault(row, column, code, message, help);
   }
 }

@@ -20,6 +20,8 @@ record Header(List<Heading> headings, int firstRow) {
   /** Caution: two columns of one name. */
   static final String TWICE = "T22";
 
+  private static final int LOOKED_AT = 20;
+
   static Header of(Sheet sheet) {
     List<Sheet.Row> rows = sheet.rows();
     if (rows.isEmpty()) {
@@ -33,7 +35,7 @@ record Header(List<Heading> headings, int firstRow) {
     }
     Sheet.Row row = rows.get(at);
     refuseNumbers(sheet, row);
-    boolean units = at + 1 < rows.size() && isUnits(rows.get(at + 1), row);
+    boolean units = at + 1 < rows.size() && isUnits(sheet, at + 1);
     List<Heading> headings = new ArrayList<>();
     for (int column = 0; column < row.cells().size(); column++) {
       headings.add(heading(sheet, row, units ? rows.get(at + 1) : null, column));
@@ -43,7 +45,7 @@ record Header(List<Heading> headings, int firstRow) {
 
   private static Heading heading(Sheet sheet, Sheet.Row row, Sheet.Row units, int column) {
     String name = row.cell(column).isEmpty() ? "column " + (column + 1) : row.cell(column);
-    String symbol = units == null ? "" : units.cell(column).replaceAll("^[\\[(]|[\\])]$", "");
+    String symbol = units == null ? "" : bare(units.cell(column));
     return symbol.isEmpty()
         ? Heading.of(sheet.file(), name)
         : Heading.with(sheet.file(), name, symbol);
@@ -59,27 +61,65 @@ record Header(List<Heading> headings, int firstRow) {
         .orElse(1);
   }
 
-  /** A title fills fewer cells than the table has columns, and the row beneath it fills more. */
+  /**
+   * A title fills fewer cells than the table has columns, and the row beneath it fills more. Where
+   * it fills half of them, the rows beneath must be one of names and one of numbers.
+   */
   private static boolean isTitle(List<Sheet.Row> rows, int at, int width) {
-    long filled = rows.get(at).filled();
-    return width > 1 && filled < Math.max(2, width / 2.0) && rows.get(at + 1).filled() > filled;
+    int filled = rows.get(at).filled();
+    Sheet.Row next = rows.get(at + 1);
+    if (width < 2 || next.filled() <= filled) {
+      return false;
+    }
+    return filled < Math.max(2, width / 2.0)
+        || 2 * filled <= width
+            && 4 * next.filled() >= 3 * width
+            && !hasNumber(next)
+            && at + 2 < rows.size()
+            && hasNumber(rows.get(at + 2));
   }
 
-  private static boolean isUnits(Sheet.Row row, Sheet.Row names) {
+  private static boolean hasNumber(Sheet.Row row) {
+    return row.cells().stream()
+        .anyMatch(
+            c -> !Double.isNaN(Cells.number(c, false)) || !Double.isNaN(Cells.number(c, true)));
+  }
+
+  /** A row of units: half of its cells are units over columns of numbers, none is a number. */
+  private static boolean isUnits(Sheet sheet, int at) {
+    Sheet.Row row = sheet.rows().get(at);
+    Sheet.Row names = sheet.rows().get(at - 1);
     int known = 0;
     int filled = 0;
     for (int column = 0; column < row.cells().size(); column++) {
-      String cell = row.cell(column);
-      String symbol = cell.replaceAll("^[\\[(]|[\\])]$", "");
-      if (!cell.isEmpty() && !cell.equals("-")) {
-        filled++;
-        known += Heading.find(names.cell(column), symbol).isPresent() ? 1 : 0;
-      }
-      if (!Double.isNaN(Cells.number(cell, false))) {
+      String symbol = bare(row.cell(column));
+      if (!Double.isNaN(Cells.number(symbol, sheet.decimalComma()))) {
         return false;
       }
+      if (!symbol.isEmpty() && !symbol.equals("-")) {
+        filled++;
+        boolean unit = Heading.find(names.cell(column), symbol).isPresent();
+        known += unit && isNumbers(sheet, at + 1, column) ? 1 : 0;
+      }
     }
-    return known > 0 && known >= filled - 1;
+    return known > 0 && 2 * known >= filled;
+  }
+
+  private static boolean isNumbers(Sheet sheet, int from, int column) {
+    int words = 0;
+    int numbers = 0;
+    int to = Math.min(sheet.rows().size(), from + LOOKED_AT);
+    for (Sheet.Row row : sheet.rows().subList(from, to)) {
+      String cell = row.cell(column);
+      boolean number = !Double.isNaN(Cells.number(cell, sheet.decimalComma()));
+      numbers += number ? 1 : 0;
+      words += number || Missing.isWord(cell) ? 0 : 1;
+    }
+    return numbers >= words;
+  }
+
+  private static String bare(String cell) {
+    return cell.replaceAll("^[\\[(]|[\\])]$", "");
   }
 
   private static void refuseNumbers(Sheet sheet, Sheet.Row row) {
@@ -101,11 +141,11 @@ record Header(List<Heading> headings, int firstRow) {
   /** Empty columns at the right end, as spreadsheets leave them, do not count. */
   private static List<Heading> trimmed(List<Heading> headings, List<Sheet.Row> rows) {
     int last = headings.size();
-    while (last > 1 && headings.get(last - 1).name().equals("column " + last)) {
-      int column = last - 1;
-      if (rows.stream().anyMatch(r -> !r.cell(column).isEmpty())) {
-        break;
-      }
+    int filled = 0;
+    for (Sheet.Row row : rows) {
+      filled = Math.max(filled, row.width());
+    }
+    while (last > Math.max(1, filled) && headings.get(last - 1).name().equals("column " + last)) {
       last--;
     }
     return headings.subList(0, last);
@@ -115,7 +155,7 @@ record Header(List<Heading> headings, int firstRow) {
     Map<String, Integer> seen = new HashMap<>();
     List<Heading> out = new ArrayList<>();
     for (Heading heading : headings) {
-      int count = seen.merge(Table.key(heading.name()), 1, Integer::sum);
+      int count = seen.merge(Finding.key(heading.name()), 1, Integer::sum);
       if (count > 1) {
         Listening.caution(
             Caution.of(

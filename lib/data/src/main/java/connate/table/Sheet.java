@@ -6,14 +6,13 @@ import java.util.List;
 /**
  * The cells of a file as text, with the lines on which they stand.
  *
- * @param file the file's name
+ * @param file the file's name, for a spreadsheet with the sheet's
  * @param rows the rows
- * @param lines the file's lines, empty where it has none to show
- * @param decimalComma whether numbers are written with a comma
+ * @param lines the file's lines, {@code null} where it has none to show
+ * @param decimalComma whether most numbers are written with a comma
  * @param separator the character between cells
  */
-record Sheet(
-    String file, List<Row> rows, List<String> lines, boolean decimalComma, char separator) {
+record Sheet(String file, List<Row> rows, Lines lines, boolean decimalComma, char separator) {
 
   /**
    * A row.
@@ -28,20 +27,46 @@ record Sheet(
     }
 
     boolean isBlank() {
-      return cells.stream().allMatch(String::isEmpty);
+      for (String cell : cells) {
+        if (!cell.isEmpty()) {
+          return false;
+        }
+      }
+      return true;
     }
 
-    long filled() {
-      return cells.stream().filter(c -> !c.isEmpty()).count();
+    int filled() {
+      int filled = 0;
+      for (String cell : cells) {
+        filled += cell.isEmpty() ? 0 : 1;
+      }
+      return filled;
+    }
+
+    /** The number of cells up to the last that is not empty. */
+    int width() {
+      int width = cells.size();
+      while (width > 0 && cells.get(width - 1).isEmpty()) {
+        width--;
+      }
+      return width;
     }
   }
 
-  /** Returns a fault of one cell, marked in its line. */
+  /** Returns a fault of one cell, marked in its line; a spreadsheet's cell is named instead. */
   Fault fault(Row row, int column, String code, String message, String help) {
-    String text = row.line() <= lines.size() ? lines.get(row.line() - 1) : "";
-    String cell = row.cell(column);
-    int start = text.isEmpty() ? column : Places.startOf(text, column, separator);
-    return new Fault(
-        file, row.line(), start + 1, Math.max(1, cell.length()), code, message, text, help);
+    int length = Math.max(1, row.cell(column).length());
+    if (lines == null) {
+      String cell = "in cell " + name(column) + row.line() + " ";
+      return new Fault(file, row.line(), column + 1, length, code, cell + message, "", help);
+    }
+    Lines.Place place = lines.place(row.line(), column, separator);
+    return new Fault(file, place.line(), place.column(), length, code, message, place.text(), help);
+  }
+
+  /** Returns a column's letters: A to Z, AA and so on. */
+  static String name(int column) {
+    String letter = String.valueOf((char) ('A' + column % 26));
+    return column < 26 ? letter : name(column / 26 - 1) + letter;
   }
 }

@@ -1,20 +1,18 @@
 package connate.table;
 
 import connate.fault.DataException;
-import connate.fault.Nearest;
+import connate.file.AtomicFile;
 import connate.quantity.Unit;
-import connate.role.Role;
-import connate.role.Roles;
 import connate.series.Labels;
 import connate.series.Listed;
 import connate.series.Listing;
 import connate.series.Series;
 import connate.series.Unstated;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
-import java.util.Locale;
-import java.util.Optional;
 import java.util.stream.IntStream;
 
 /**
@@ -33,11 +31,13 @@ public final class Table implements Listed {
   private final String name;
   private final List<Column> columns;
   private final int[] lines;
+  private final Finding finding;
 
   private Table(String name, List<Column> columns, int[] lines) {
     this.name = name;
     this.columns = List.copyOf(columns);
     this.lines = lines;
+    this.finding = new Finding(name, this.columns);
   }
 
   static Table of(String name, List<Column> columns, int[] lines) {
@@ -83,10 +83,6 @@ public final class Table implements Listed {
     return new Table(name, columns, new int[series.length == 0 ? 0 : series[0].size()]);
   }
 
-  static String key(String name) {
-    return name.toLowerCase(Locale.ROOT).strip();
-  }
-
   /** Returns the name, which is the file's. */
   public String name() {
     return name;
@@ -111,7 +107,7 @@ public final class Table implements Listed {
 
   /** Returns whether there is a column of this name or role. */
   public boolean has(String nameOrRole) {
-    return find(nameOrRole).isPresent();
+    return finding.find(nameOrRole).isPresent();
   }
 
   /**
@@ -120,7 +116,7 @@ public final class Table implements Listed {
    * @throws IllegalArgumentException if there is none
    */
   public boolean isNumeric(String nameOrRole) {
-    return wanted(nameOrRole).isNumeric();
+    return finding.wanted(nameOrRole).isNumeric();
   }
 
   /**
@@ -130,7 +126,7 @@ public final class Table implements Listed {
    * @throws IllegalArgumentException if there is none, or it holds words
    */
   public Series get(String nameOrRole) {
-    Column column = wanted(nameOrRole);
+    Column column = finding.wanted(nameOrRole);
     Series series =
         column
             .series()
@@ -143,7 +139,7 @@ public final class Table implements Listed {
                             + "» holds words: ask with labels(\""
                             + column.name()
                             + "\")"));
-    return depth().filter(d -> d != series).map(series::atDepth).orElse(series);
+    return finding.depth().filter(d -> d != series).map(series::atDepth).orElse(series);
   }
 
   /**
@@ -152,7 +148,10 @@ public final class Table implements Listed {
    * @throws IllegalArgumentException if there is none, or it holds numbers
    */
   public Labels labels(String nameOrRole) {
-    Column column = wanted(nameOrRole);
+    Column column = finding.wanted(nameOrRole);
+    if (column.isNumeric() && rows() > 0 && column.numbers().count() == 0) {
+      return Labels.of(column.name(), new String[rows()]);
+    }
     if (column.isNumeric()) {
       throw new IllegalArgumentException(
           name
@@ -191,7 +190,7 @@ public final class Table implements Listed {
 
   private Table with(Column column) {
     List<Column> next = new ArrayList<>(columns);
-    int at = indexOf(column.name());
+    int at = finding.indexOf(column.name());
     if (at < 0) {
       next.add(column);
     } else {
@@ -234,7 +233,7 @@ public final class Table implements Listed {
   /** Returns the table with a column under another name. */
   public Table rename(String column, String other) {
     List<Column> next = new ArrayList<>(columns);
-    next.set(indexOf(wanted(column).name()), wanted(column).named(other));
+    next.set(finding.indexOf(finding.wanted(column).name()), finding.wanted(column).named(other));
     return new Table(name, next, lines);
   }
 
@@ -265,7 +264,7 @@ public final class Table implements Listed {
 
   /** Returns the rows in which a column has a value. */
   public Table present(String column) {
-    Column wanted = wanted(column);
+    Column wanted = finding.wanted(column);
     return rows(IntStream.range(0, rows()).filter(r -> !wanted.isMissing(r)).toArray());
   }
 
@@ -279,7 +278,7 @@ public final class Table implements Listed {
 
   /** Returns the rows by rising value of a column, missing ones last. */
   public Table sortedBy(String column) {
-    Column wanted = wanted(column);
+    Column wanted = finding.wanted(column);
     Comparator<Integer> order =
         wanted.isNumeric()
             ? Comparator.comparingDouble(r -> wanted.numbers().value(r))
@@ -289,9 +288,30 @@ public final class Table implements Listed {
         IntStream.range(0, rows()).boxed().sorted(order).mapToInt(Integer::intValue).toArray());
   }
 
+  /**
+   * Returns the table with the columns of another beside its own, where a key is the same. Rows
+   * without a partner stay, with missing values.
+   *
+   * @param other the other table, in which a key stands once
+   * @param key a column's name or role that both have, such as {@code well}
+   * @throws IllegalArgumentException if a key stands twice in the other table
+   */
+  public Table join(Table other, String key) {
+    return new Joining(this, other, key).table(key);
+  }
+
   /** Returns the table as CSV: units in the header, missing values empty, numbers in full. */
   public String csv() {
     return TableCsv.of(this);
+  }
+
+  /**
+   * Writes the table as CSV, UTF-8, in one step: who reads sees the old file or the new one. A word
+   * that a spreadsheet would take for a formula gets an apostrophe before it, which {@link #read}
+   * takes away again.
+   */
+  public void writeCsv(Path path) {
+    AtomicFile.write(path, csv().getBytes(StandardCharsets.UTF_8));
   }
 
   /** Returns the same columns as a Tablesaw table; units and lines stay here. */
@@ -301,7 +321,7 @@ public final class Table implements Listed {
 
   /** Returns what a column was read as, in a few words. */
   public String describe(String column) {
-    Column found = wanted(column);
+    Column found = finding.wanted(column);
     if (!found.isNumeric()) {
       return found.name() + ": words";
     }
@@ -313,39 +333,8 @@ public final class Table implements Listed {
     return columns;
   }
 
-  private Column wanted(String nameOrRole) {
-    return find(nameOrRole)
-        .orElseThrow(
-            () ->
-                new IllegalArgumentException(
-                    name + " has no column " + Nearest.miss(nameOrRole, names())));
-  }
-
-  private Optional<Column> find(String nameOrRole) {
-    int at = indexOf(nameOrRole);
-    return at >= 0 ? Optional.of(columns.get(at)) : Roles.named(nameOrRole).flatMap(this::byRole);
-  }
-
-  private int indexOf(String wanted) {
-    for (int i = 0; i < columns.size(); i++) {
-      if (key(columns.get(i).name()).equals(key(wanted))) {
-        return i;
-      }
-    }
-    return -1;
-  }
-
-  private Optional<Column> byRole(Role role) {
-    return columns.stream()
-        .filter(c -> role.rank(c.name()) >= 0)
-        .min(Comparator.comparingInt(c -> role.rank(c.name())));
-  }
-
-  private Optional<Series> depth() {
-    return Roles.named("depth")
-        .flatMap(this::byRole)
-        .flatMap(Column::series)
-        .filter(d -> d.unit().dimension() == connate.quantity.Length.DIMENSION);
+  Column column(String nameOrRole) {
+    return finding.wanted(nameOrRole);
   }
 
   @Override

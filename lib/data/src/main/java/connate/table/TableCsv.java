@@ -1,6 +1,7 @@
 package connate.table;
 
 import connate.series.Unstated;
+import java.util.List;
 import java.util.stream.Collectors;
 
 /** Writes a table as CSV. */
@@ -12,14 +13,24 @@ final class TableCsv {
 
   static String of(Table table) {
     StringBuilder out = new StringBuilder();
-    out.append(table.columns().stream().map(TableCsv::head).collect(Collectors.joining(",")));
-    out.append('\n');
+    List<Column> columns = table.columns();
+    out.append(columns.stream().map(TableCsv::head).collect(Collectors.joining(",")));
     for (int row = 0; row < table.rows(); row++) {
-      int at = row;
-      out.append(table.columns().stream().map(c -> cell(c, at)).collect(Collectors.joining(",")));
       out.append('\n');
+      if (isBlank(columns, row)) {
+        // an empty line would be passed over when the file is read
+        out.append("NaN").append(",".repeat(columns.size() - 1));
+        continue;
+      }
+      for (int column = 0; column < columns.size(); column++) {
+        out.append(column == 0 ? "" : ",").append(cell(columns.get(column), row));
+      }
     }
-    return out.toString();
+    return out.append('\n').toString();
+  }
+
+  private static boolean isBlank(List<Column> columns, int row) {
+    return columns.stream().allMatch(c -> c.isMissing(row));
   }
 
   private static String head(Column column) {
@@ -38,7 +49,23 @@ final class TableCsv {
 
   /** A text that a spreadsheet would take for a formula gets an apostrophe before it. */
   private static String harmless(String text) {
-    return !text.isEmpty() && FORMULA_STARTS.indexOf(text.charAt(0)) >= 0 ? "'" + text : text;
+    return isFormula(text) ? "'" + text : text;
+  }
+
+  /** Takes away the apostrophe that stands before what a spreadsheet would take for a formula. */
+  static String plain(String cell) {
+    return cell.length() > 1 && cell.charAt(0) == '\'' && isFormula(cell)
+        ? cell.substring(1)
+        : cell;
+  }
+
+  /** Apostrophes before it do not count, so that each of them survives writing and reading. */
+  private static boolean isFormula(String text) {
+    int at = 0;
+    while (at < text.length() && text.charAt(at) == '\'') {
+      at++;
+    }
+    return at < text.length() && FORMULA_STARTS.indexOf(text.charAt(at)) >= 0;
   }
 
   private static String quoted(String text) {

@@ -1,19 +1,21 @@
 package connate.table;
 
 import connate.quantity.Numbers;
+import connate.role.Roles;
 import connate.series.Listing;
 import connate.series.Series;
 import connate.series.Unstated;
 import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
 import java.util.ArrayList;
-import java.util.HashSet;
 import java.util.List;
-import java.util.Set;
 
 /** How a table shows: its first rows, and beneath them ranges, gaps and what needs a look. */
 final class TableListing {
 
   private static final int SHOWN = 8;
+  private static final MathContext DIGITS = new MathContext(9, RoundingMode.HALF_EVEN);
 
   private TableListing() {}
 
@@ -30,7 +32,7 @@ final class TableListing {
       out.row(cells(table, row));
     }
     table.columns().stream().map(TableListing::range).forEach(out::note);
-    repeats(table).forEach(out::note);
+    looks(table).forEach(out::note);
     return out.build(table.rows());
   }
 
@@ -40,12 +42,18 @@ final class TableListing {
       if (column.isMissing(row)) {
         cells.add(null);
       } else if (column.isNumeric()) {
-        cells.add(new BigDecimal(column.text(row)));
+        cells.add(shown(column.numbers().value(row)));
       } else {
         cells.add(column.words().label(row));
       }
     }
     return cells.toArray();
+  }
+
+  /** A number as the file has it, but for digits that no measurement has. */
+  private static BigDecimal shown(double value) {
+    BigDecimal exact = new BigDecimal(Numbers.full(value));
+    return exact.precision() > DIGITS.getPrecision() ? exact.round(DIGITS) : exact;
   }
 
   private static String range(Column column) {
@@ -59,9 +67,14 @@ final class TableListing {
     if (present.length == 0) {
       return series.name() + ": no value in any row";
     }
-    double low = java.util.Arrays.stream(present).min().orElseThrow();
-    double high = java.util.Arrays.stream(present).max().orElseThrow();
-    long zeros = java.util.Arrays.stream(present).filter(v -> v == 0).count();
+    double low = Double.POSITIVE_INFINITY;
+    double high = Double.NEGATIVE_INFINITY;
+    int zeros = 0;
+    for (double value : present) {
+      low = Math.min(low, value);
+      high = Math.max(high, value);
+      zeros += value == 0 ? 1 : 0;
+    }
     return series.name()
         + ": "
         + Numbers.text(low)
@@ -91,23 +104,34 @@ final class TableListing {
     return count == 0 ? "" : ", " + count + " missing";
   }
 
-  /** Rows that are the same in every column. */
-  private static List<String> repeats(Table table) {
-    Set<List<String>> seen = new HashSet<>();
-    int repeats = 0;
-    int first = -1;
-    for (int row = 0; row < table.rows(); row++) {
-      int at = row;
-      if (!seen.add(table.columns().stream().map(c -> c.text(at)).toList())) {
-        first = repeats++ == 0 ? row : first;
+  /** What needs a look: values outside of the usual range, rows that stand twice. */
+  private static List<String> looks(Table table) {
+    List<String> notes = new ArrayList<>();
+    for (Column column : table.columns()) {
+      if (column.isNumeric()) {
+        Series series = column.numbers();
+        Outliers out = Outliers.of(series, Roles.find(series.name(), symbol(series)));
+        if (out.count() > 0) {
+          notes.add(series.name() + ": " + out.words() + at(table, out.first()));
+        }
       }
     }
-    return repeats == 0
-        ? List.of()
-        : List.of(
-            repeats
-                + (repeats == 1 ? " row is" : " rows are")
-                + " the same as an earlier one, the first in line "
-                + table.line(first));
+    Repeats repeats = Repeats.of(table);
+    if (repeats.count() > 0) {
+      notes.add(
+          repeats.count()
+              + (repeats.count() == 1 ? " row is" : " rows are")
+              + " the same as an earlier one, the first"
+              + at(table, repeats.first()).replace(",", ""));
+    }
+    return notes;
+  }
+
+  private static String symbol(Series series) {
+    return series.unit().equals(Unstated.UNIT) ? "" : series.unit().symbol();
+  }
+
+  private static String at(Table table, int row) {
+    return table.line(row) == 0 ? ", row " + (row + 1) : ", in line " + table.line(row);
   }
 }

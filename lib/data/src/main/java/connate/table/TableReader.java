@@ -1,7 +1,7 @@
 package connate.table;
 
-import connate.fault.DataException;
-import connate.fault.Fault;
+import connate.method.Caution;
+import connate.method.Listening;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -11,7 +11,7 @@ final class TableReader {
   private final Sheet sheet;
   private final Header header;
   private final List<Sheet.Row> rows;
-  private final List<Fault> faults = new ArrayList<>();
+  private final Faults faults = new Faults();
 
   private TableReader(Sheet sheet) {
     this.sheet = sheet;
@@ -27,44 +27,56 @@ final class TableReader {
     checkWidths();
     List<Column> columns = new ArrayList<>();
     for (int column = 0; column < header.headings().size(); column++) {
-      columns.add(column(column));
+      Heading heading = header.headings().get(column);
+      columns.add(new ColumnReader(sheet, heading, rows, column, faults).read());
     }
-    if (!faults.isEmpty()) {
-      throw new DataException(faults, faults.size());
-    }
+    faults.throwAny();
     int[] lines = rows.stream().mapToInt(Sheet.Row::line).toArray();
     return Table.of(sheet.file(), columns, lines);
   }
 
   /**
-   * A row that is too long has a cell too many somewhere: nobody can say which column it shifts.
+   * A row that is too long has a cell too many somewhere: nobody can say which column it shifts. A
+   * row that ends early may have been cut; its last cells count as missing, and the reader is told.
    */
   private void checkWidths() {
     int width = header.headings().size();
+    int cut = 0;
+    int firstCut = 0;
     for (Sheet.Row row : rows) {
-      for (int column = width; column < row.cells().size(); column++) {
-        if (!row.cell(column).isEmpty()) {
-          faults.add(
-              sheet.fault(
-                  row,
-                  column,
-                  "T05",
-                  "a cell too many: " + row.cells().size() + " cells under " + width + " columns",
-                  "is a decimal comma meant, or a comma in words? quote the cell or part cells by ;"));
-          break;
-        }
+      int filled = row.width();
+      if (filled > width) {
+        faults.add(
+            () ->
+                sheet.fault(
+                    row,
+                    width,
+                    "T05",
+                    "a cell too many: " + filled + " cells under " + width + " columns",
+                    "is a decimal comma meant, or a comma in words? quote the cell or part cells"
+                        + " by ;"));
+      }
+      if (sheet.lines() != null && row.cells().size() < width) {
+        firstCut = cut++ == 0 ? row.line() : firstCut;
       }
     }
-    if (!faults.isEmpty()) {
-      throw new DataException(faults, faults.size());
+    faults.throwAny();
+    if (cut > 0) {
+      tellCut(cut, firstCut);
     }
   }
 
-  private Column column(int column) {
-    Heading heading = header.headings().get(column);
-    ColumnReader reader = new ColumnReader(sheet, heading, rows, column);
-    Column out = reader.read();
-    faults.addAll(reader.faults());
-    return out;
+  private void tellCut(int count, int line) {
+    Listening.caution(
+        Caution.of(
+            "T29",
+            sheet.file(),
+            sheet.file()
+                + ": "
+                + count
+                + (count == 1 ? " row ends" : " rows end")
+                + " before the last column, the first in line "
+                + line
+                + "; what is not there counts as missing"));
   }
 }

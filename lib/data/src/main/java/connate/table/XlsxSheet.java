@@ -2,25 +2,32 @@ package connate.table;
 
 import connate.fault.DataException;
 import connate.fault.Fault;
+import connate.fault.Nearest;
 import java.io.ByteArrayInputStream;
 import java.io.IOException;
-import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
+import java.util.Iterator;
 import java.util.List;
 import java.util.stream.Stream;
-import java.util.zip.ZipEntry;
-import java.util.zip.ZipInputStream;
 import org.dhatim.fastexcel.reader.Cell;
 import org.dhatim.fastexcel.reader.ReadableWorkbook;
+import org.dhatim.fastexcel.reader.ReadingOptions;
 import org.dhatim.fastexcel.reader.Row;
 
 /** Reads the cells of an XLSX file, after a look at what it inflates to. */
 final class XlsxSheet {
 
-  private static final long LARGEST = 512L << 20;
-  private static final int COLUMNS = 10_000;
+  private static final long CELLS = 50_000_000;
+  private static final ReadingOptions WITH_FORMATS = new ReadingOptions(true, true);
 
-  private XlsxSheet() {}
+  private final String file;
+  private final boolean from1904;
+  private long cells;
+
+  private XlsxSheet(String file, boolean from1904) {
+    this.file = file;
+    this.from1904 = from1904;
+  }
 
   static boolean isXlsx(byte[] bytes) {
     return bytes.length > 4 && bytes[0] == 'P' && bytes[1] == 'K' && bytes[2] == 3 && bytes[3] == 4;
@@ -33,17 +40,17 @@ final class XlsxSheet {
    */
   static Sheet read(String file, byte[] bytes, String sheet) {
     try {
-      inspect(file, bytes);
-      try (ReadableWorkbook book = new ReadableWorkbook(new ByteArrayInputStream(bytes))) {
+      XlsxBounds.check(file, bytes);
+      try (ReadableWorkbook book =
+          new ReadableWorkbook(new ByteArrayInputStream(bytes), WITH_FORMATS)) {
         org.dhatim.fastexcel.reader.Sheet found = find(file, book, sheet);
         try (Stream<Row> rows = found.openStream()) {
-          return new Sheet(file, rows.map(XlsxSheet::row).toList(), List.of(), false, ',');
+          return new XlsxSheet(file, book.isDate1904()).read(rows.iterator());
         }
       }
+    } catch (DataException known) {
+      throw known;
     } catch (IOException | RuntimeException e) {
-      if (e instanceof DataException known) {
-        throw known;
-      }
       throw refused(
           file,
           "T11",
@@ -52,15 +59,37 @@ final class XlsxSheet {
     }
   }
 
-  private static Sheet.Row row(Row row) {
-    List<String> cells = new ArrayList<>();
-    for (Cell cell : row) {
-      cells.add(cell == null || cell.getText() == null ? "" : cell.getText().strip());
-      if (cells.size() > COLUMNS) {
-        throw new IllegalArgumentException("more than " + COLUMNS + " columns");
+  private Sheet read(Iterator<Row> found) {
+    List<Sheet.Row> rows = new ArrayList<>();
+    while (found.hasNext()) {
+      Sheet.Row row = row(found.next());
+      if (!row.isBlank()) {
+        rows.add(row);
       }
     }
-    return new Sheet.Row(row.getRowNum(), cells);
+    return new Sheet(file, rows, null, false, ',');
+  }
+
+  private Sheet.Row row(Row row) {
+    cells += row.getCellCount();
+    if (row.getCellCount() > CsvSheet.COLUMNS || cells > CELLS) {
+      throw refused(
+          file,
+          "T16",
+          "row "
+              + row.getRowNum()
+              + " passes the bounds of "
+              + CsvSheet.COLUMNS
+              + " columns and "
+              + CELLS
+              + " cells",
+          "save the part that matters as CSV");
+    }
+    List<String> texts = new ArrayList<>(row.getCellCount());
+    for (Cell cell : row) {
+      texts.add(XlsxCell.text(cell, from1904));
+    }
+    return new Sheet.Row(row.getRowNum(), texts);
   }
 
   private static org.dhatim.fastexcel.reader.Sheet find(
@@ -68,53 +97,16 @@ final class XlsxSheet {
     if (sheet.isEmpty()) {
       return book.getFirstSheet();
     }
-    return book.findSheet(sheet)
-        .orElseThrow(
-            () ->
-                refused(
-                    file,
-                    "T12",
-                    "there is no sheet «" + sheet + "»",
-                    "there are "
-                        + String.join(
-                            ", ",
-                            book.getSheets()
-                                .map(org.dhatim.fastexcel.reader.Sheet::getName)
-                                .toList())));
+    return book.findSheet(sheet).orElseThrow(() -> noSheet(file, book, sheet));
   }
 
-  /** Inflates each part once, counting, and looks for document types, before anything parses it. */
-  private static void inspect(String file, byte[] bytes) throws IOException {
-    long total = 0;
-    byte[] chunk = new byte[1 << 16];
-    try (ZipInputStream zip = new ZipInputStream(new ByteArrayInputStream(bytes))) {
-      for (ZipEntry entry = zip.getNextEntry(); entry != null; entry = zip.getNextEntry()) {
-        boolean head = true;
-        for (int n = zip.read(chunk); n > 0; n = zip.read(chunk)) {
-          total += n;
-          if (total > LARGEST) {
-            throw refused(
-                file,
-                "T13",
-                "it inflates to more than " + (LARGEST >> 20) + " MB",
-                "save the sheet that matters as CSV");
-          }
-          if (head && hasDocumentType(chunk, n)) {
-            throw refused(
-                file,
-                "T14",
-                "it declares entities, which no spreadsheet needs",
-                "open it in a spreadsheet program and save it anew");
-          }
-          head = false;
-        }
-      }
-    }
-  }
-
-  private static boolean hasDocumentType(byte[] chunk, int n) {
-    String start = new String(chunk, 0, n, StandardCharsets.ISO_8859_1);
-    return start.contains("<!DOCTYPE") || start.contains("<!ENTITY");
+  private static DataException noSheet(String file, ReadableWorkbook book, String sheet) {
+    List<String> names = book.getSheets().map(org.dhatim.fastexcel.reader.Sheet::getName).toList();
+    return refused(
+        file,
+        "T12",
+        "there is no sheet " + Nearest.miss(sheet, names),
+        "name one of them, or none for the first");
   }
 
   private static DataException refused(String file, String code, String message, String help) {

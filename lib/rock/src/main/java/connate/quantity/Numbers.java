@@ -4,7 +4,10 @@ import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
 
-/** How numbers are written: for people with four significant digits, for records with ten. */
+/**
+ * How numbers are written: for people with four significant digits, for records with ten, for files
+ * with all that they need.
+ */
 public final class Numbers {
 
   private static final MathContext PEOPLE = new MathContext(4, RoundingMode.HALF_EVEN);
@@ -12,6 +15,14 @@ public final class Numbers {
   private static final double WHOLE = 1e7;
   private static final double SMALL = 1e-3;
   private static final double LARGE = 1e6;
+  private static final double EXACT = 1e15;
+  private static final int SAFE_DIGITS = 15;
+  private static final int MOST_DIGITS = 17;
+
+  /** Beneath a power of two the doubles lie closer, so that the nearest decimal may miss it. */
+  private static final RoundingMode[] NEAREST_FIRST = {
+    RoundingMode.HALF_EVEN, RoundingMode.UP, RoundingMode.DOWN
+  };
 
   private Numbers() {}
 
@@ -35,6 +46,30 @@ public final class Numbers {
       return "0";
     }
     return write(new BigDecimal(value).round(RECORD), value);
+  }
+
+  /**
+   * Returns a number with the fewest digits that read back as the same double, 15 to 17 of them at
+   * most. {@link Double#toString(double)} writes some numbers longer before JDK 19 than after, so
+   * that a file would differ between machines.
+   */
+  public static String full(double value) {
+    if (!Double.isFinite(value)) {
+      throw new IllegalArgumentException("no number to write: " + value);
+    }
+    if (value == StrictMath.rint(value) && StrictMath.abs(value) < EXACT) {
+      return Long.toString((long) value);
+    }
+    BigDecimal exact = new BigDecimal(value);
+    for (int digits = SAFE_DIGITS; digits < MOST_DIGITS; digits++) {
+      for (RoundingMode mode : NEAREST_FIRST) {
+        BigDecimal rounded = exact.round(new MathContext(digits, mode));
+        if (rounded.doubleValue() == value) {
+          return write(rounded, value, EXACT);
+        }
+      }
+    }
+    return write(exact.round(new MathContext(MOST_DIGITS, RoundingMode.HALF_EVEN)), value, EXACT);
   }
 
   /** Returns where the number at the start of a text ends; 0 where it starts with none. */
@@ -73,9 +108,13 @@ public final class Numbers {
   }
 
   private static String write(BigDecimal rounded, double value) {
+    return write(rounded, value, LARGE);
+  }
+
+  private static String write(BigDecimal rounded, double value, double large) {
     double size = StrictMath.abs(value);
     BigDecimal short_ = rounded.stripTrailingZeros();
-    if (size >= SMALL && size < LARGE) {
+    if (size >= SMALL && size < large) {
       return short_.toPlainString();
     }
     int exponent = short_.precision() - short_.scale() - 1;
