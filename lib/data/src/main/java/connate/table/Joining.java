@@ -25,7 +25,7 @@ final class Joining {
     List<Column> columns = new ArrayList<>(left.columns());
     Column used = right.column(key);
     for (Column column : right.columns()) {
-      if (column != used) {
+      if (!column.name().equals(used.name())) {
         columns.add(beside(column));
       }
     }

@@ -6,7 +6,6 @@ import connate.method.Listening;
 import connate.method.MethodCard;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.function.Supplier;
 
 /** Hears the cautions of some work. */
 final class Heard implements Listener {
@@ -16,15 +15,15 @@ final class Heard implements Listener {
   private Heard() {}
 
   /** Returns the codes of the cautions that some work raises. */
-  static List<String> codes(Supplier<?> work) {
+  static List<String> codes(Runnable work) {
     return during(work).stream().map(Caution::code).toList();
   }
 
-  static List<Caution> during(Supplier<?> work) {
+  static List<Caution> during(Runnable work) {
     Heard heard = new Heard();
     Listening.to(heard);
     try {
-      work.get();
+      work.run();
     } finally {
       Listening.to(Listener.DEAF);
     }

@@ -33,13 +33,12 @@ final class TinyXlsx {
   /** Adds a sheet of rows as they stand in the file. */
   TinyXlsx sheet(String name, String rows) {
     count++;
-    sheets.append("<sheet name=\"%s\" sheetId=\"%d\" r:id=\"r%d\"/>".formatted(name, count, count));
-    relations.append(
-        "<Relationship Id=\"r%d\" Type=\"%s/worksheet\" Target=\"worksheets/sheet%d.xml\"/>"
-            .formatted(count, REL, count));
-    types.append(
-        "<Override PartName=\"/xl/worksheets/sheet%d.xml\" ContentType=\"%sworksheet+xml\"/>"
-            .formatted(count, TYPE));
+    sheets.append(
+        "<sheet name=\"" + name + "\" sheetId=\"" + count + "\" r:id=\"r" + count + "\"/>");
+    relations.append("<Relationship Id=\"r" + count + "\" Type=\"" + REL + "/worksheet\"");
+    relations.append(" Target=\"worksheets/sheet" + count + ".xml\"/>");
+    types.append("<Override PartName=\"/xl/worksheets/sheet" + count + ".xml\"");
+    types.append(" ContentType=\"" + TYPE + "worksheet+xml\"/>");
     part(
         "xl/worksheets/sheet" + count + ".xml",
         "<worksheet" + MAIN + "><sheetData>" + rows + "</sheetData></worksheet>");
@@ -67,12 +66,12 @@ final class TinyXlsx {
     String[] parts = text.split("#style");
     if (parts[0].matches("-?[0-9.]+(E-?\\d+)?")) {
       String style = parts.length > 1 ? " s=\"" + parts[1] + "\"" : "";
-      return "<c r=\"%s\"%s><v>%s</v></c>".formatted(at, style, parts[0]);
+      return "<c r=\"" + at + "\"" + style + "><v>" + parts[0] + "</v></c>";
     }
     if (text.startsWith("#")) {
-      return "<c r=\"%s\" t=\"e\"><v>%s</v></c>".formatted(at, text);
+      return "<c r=\"" + at + "\" t=\"e\"><v>" + text + "</v></c>";
     }
-    return "<c r=\"%s\" t=\"inlineStr\"><is><t>%s</t></is></c>".formatted(at, text);
+    return "<c r=\"" + at + "\" t=\"inlineStr\"><is><t>" + text + "</t></is></c>";
   }
 
   byte[] bytes() {
