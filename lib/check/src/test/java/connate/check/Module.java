@@ -14,7 +14,13 @@ import java.util.stream.Stream;
  */
 enum Module {
   ROCK("org.apache.commons.math3"),
-  DATA("tech.tablesaw", "it.unimi.dsi.fastutil", "de.siegmar.fastcsv", "org.dhatim.fastexcel"),
+  DATA(
+      "tech.tablesaw",
+      "it.unimi.dsi.fastutil",
+      "de.siegmar.fastcsv",
+      "org.dhatim.fastexcel",
+      // the archive under a spreadsheet, walked as its reader walks it
+      "org.apache.commons.compress"),
   FIGURE("org.knowm.xchart", "java.awt", "javax.imageio"),
   ENGINE("org.objectweb.asm"),
   KERNEL(
