@@ -1,0 +1,79 @@
+package connate.conductivity;
+
+import connate.formula.Formula;
+import connate.method.Constants;
+import connate.method.MethodCard;
+import connate.method.Range;
+import connate.quantity.Fraction;
+import connate.quantity.HydraulicConductivity;
+import connate.quantity.Length;
+import connate.quantity.Operand;
+import connate.quantity.Temperature;
+import connate.quantity.Units;
+import connate.series.Series;
+
+/**
+ * Slichter: hydraulic conductivity of loose sand from its grain size.
+ *
+ * <pre>
+ * K = (g/ν) 10⁻² n^3.287 d10²
+ * </pre>
+ *
+ * <p>g is 9.80665 m/s², ν the kinematic viscosity of water at the temperature, sizes are in metres
+ * unless the equation says mm.
+ *
+ * <p><b>Valid</b> for d10 from 0.01 to 5 mm.
+ *
+ * <p><b>Source</b>: Slichter (1899), US Geological Survey, 19th Annual Report, part 2, 295–384; in
+ * the form of Vuković and Soro (1992). Constants from memory.
+ *
+ * <p><b>Checked</b> in {@code SlichterTest}.
+ */
+public final class Slichter {
+
+  /** The facts above for {@code help}, the log and the method index. */
+  public static final MethodCard CARD =
+      MethodCard.named("slichter", "Slichter")
+          .equation("K = (g/ν) 0.01 n^3.287 d10²")
+          .input("d10", "size with 10 % finer", Units.mm, Range.POSITIVE)
+          .valid(0.01, 5)
+          .input("n", "porosity", Units.fraction, Range.above(0).below(1))
+          .input("T", "temperature of the water", Units.degC, Range.of(0, 100))
+          .result("K", "hydraulic conductivity", Units.mPerSecond)
+          .source(
+              "Slichter (1899), US Geological Survey, 19th Annual Report, part 2, 295–384; in the form of Vuković and Soro (1992)")
+          .constants(Constants.FROM_MEMORY)
+          .topics("hydraulic conductivity", "grain size", "aquifer", "sand")
+          .build();
+
+  private static final double BETA = 1e-2;
+
+  /** How the table of all formulas asks this one. */
+  static final Entry ENTRY =
+      new Entry(CARD, sand -> metresPerSecond(sand.d10(), sand.n(), sand.celsius()), sand -> "");
+
+  private static final Formula<HydraulicConductivity> FORMULA =
+      Formula.of(CARD, Units.mPerSecond, Slichter::metresPerSecond);
+
+  private Slichter() {}
+
+  /** Returns the conductivity of one sand, in m/d. */
+  public static HydraulicConductivity of(Length d10, Fraction porosity, Temperature temperature) {
+    return FORMULA.value(d10, porosity, temperature).to(Units.mPerDay);
+  }
+
+  /** Returns the conductivity of each row, in m/d. */
+  public static Series of(Operand d10, Operand porosity, Operand temperature) {
+    return FORMULA.series(d10, porosity, temperature).to(Units.mPerDay);
+  }
+
+  static double metresPerSecond(double mm, double n, double celsius) {
+    return FreshWater.gravityOverViscosity(celsius) * factor(mm, n);
+  }
+
+  /** Returns K ν / g in m². */
+  static double factor(double mm, double n) {
+    double d = mm / 1000;
+    return BETA * StrictMath.pow(n, 3.287) * d * d;
+  }
+}
