@@ -1,7 +1,6 @@
 package connate.table;
 
 import connate.quantity.Numbers;
-import java.util.regex.Pattern;
 
 /** What a cell holds: a number, a number with its unit, or words. */
 final class Cells {
@@ -10,17 +9,6 @@ final class Cells {
 
   /** The digits that a double holds for certain; a longer name of digits would change. */
   private static final int EXACT_DIGITS = 15;
-
-  /** Groups of thousands that leave no doubt: two of them, or a decimal sign of another kind. */
-  private static final Pattern BLANK_GROUPS =
-      Pattern.compile("[-+]?[1-9]\\d{0,2}([ \u00a0\u202f'’])\\d{3}(?:\\1\\d{3})*(?:[.,]\\d+)?");
-
-  private static final Pattern COMMA_GROUPS =
-      Pattern.compile("[-+]?[1-9]\\d{0,2}(?:(?:,\\d{3})+\\.\\d+|(?:,\\d{3}){2,})");
-  private static final Pattern POINT_GROUPS =
-      Pattern.compile("[-+]?[1-9]\\d{0,2}(?:(?:\\.\\d{3})+,\\d+|(?:\\.\\d{3}){2,})");
-  private static final Pattern ONE_COMMA_GROUP = Pattern.compile("[-+]?[1-9]\\d{0,2},\\d{3}");
-  private static final Pattern ONE_POINT_GROUP = Pattern.compile("[-+]?[1-9]\\d{0,2}\\.\\d{3}");
 
   private Cells() {}
 
@@ -32,7 +20,7 @@ final class Cells {
     String text = cell.charAt(0) == MINUS ? '-' + cell.substring(1) : cell;
     String plain = decimalComma ? swapped(text) : text;
     if (Numbers.end(plain) != plain.length()) {
-      return grouped(text, decimalComma);
+      return Thousands.number(text, decimalComma);
     }
     double value = Double.parseDouble(plain);
     return Double.isInfinite(value) ? Double.NaN : value;
@@ -47,21 +35,9 @@ final class Cells {
     return text.indexOf('.') >= 0 ? text.replace('.', '\'') : text.replace(',', '.');
   }
 
-  private static double grouped(String text, boolean decimalComma) {
-    boolean fits =
-        BLANK_GROUPS.matcher(text).matches()
-            ? text.indexOf(decimalComma ? '.' : ',') < 0
-            : (decimalComma ? POINT_GROUPS : COMMA_GROUPS).matcher(text).matches();
-    if (!fits) {
-      return Double.NaN;
-    }
-    String bare = text.replaceAll(decimalComma ? "[ \u00a0\u202f'’.]" : "[ \u00a0\u202f'’,]", "");
-    return Double.parseDouble(bare.replace(',', '.'));
-  }
-
   /** Returns whether a cell such as {@code 1,234} may be a thousand or a decimal. */
   static boolean isDoubtful(String cell, boolean decimalComma) {
-    return (decimalComma ? ONE_POINT_GROUP : ONE_COMMA_GROUP).matcher(cell).matches();
+    return cell.indexOf(decimalComma ? '.' : ',') > 0 && Thousands.isOneGroup(cell, decimalComma);
   }
 
   /** Returns whether the cell is a name of digits, such as 00123, that a number would not keep. */

@@ -14,13 +14,15 @@ import java.util.Set;
 
 /**
  * Decides whether a column holds numbers or words. It holds numbers where its heading names a unit
- * or where four of five cells that are not empty are numbers; the others are then faults, told with
- * their places.
+ * and any cell is one, or where four of five cells that are not empty are numbers; the others are
+ * then faults, told with their places.
  */
 final class ColumnReader {
 
   private static final double GREAT_MAJORITY = 0.8;
-  private static final Set<String> WORDS = Set.of("well", "zone", "facies");
+
+  /** Roles whose columns hold words, also where they are written in digits. */
+  static final Set<String> WORDS = Set.of("well", "zone", "facies");
 
   private final Sheet sheet;
   private final Heading heading;
@@ -51,9 +53,10 @@ final class ColumnReader {
       doubtful += isNearNumber(scan.cell(row)) ? 1 : 0;
     }
     boolean meant = isNamedWords();
-    boolean majority =
-        scan.numbers() + measured + doubtful >= GREAT_MAJORITY * scan.filled() && scan.filled() > 0;
-    boolean numeric = hasUnit() || !meant && (majority || scan.filled() == 0);
+    int near = scan.numbers() + measured + doubtful;
+    boolean empty = scan.filled() == 0;
+    boolean majority = empty || near >= GREAT_MAJORITY * scan.filled();
+    boolean numeric = hasUnit() ? empty || near > 0 : !meant && majority;
     return numeric ? Column.of(numbers(odd, measured)) : Column.of(words(meant));
   }
 
@@ -77,7 +80,7 @@ final class ColumnReader {
 
   private Labels words(boolean meant) {
     boolean wanted = role().map(r -> r.unit() != null).orElse(false);
-    if (!meant && (wanted || scan.numbers() > scan.filled() / 5)) {
+    if (hasUnit() || !meant && (wanted || scan.numbers() > scan.filled() / 5)) {
       looks.words(scan.numbers(), scan.filled());
     }
     String[] words = new String[rows.size()];

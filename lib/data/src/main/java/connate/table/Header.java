@@ -119,7 +119,9 @@ record Header(List<Heading> headings, int firstRow) {
   }
 
   private static String bare(String cell) {
-    return cell.replaceAll("^[\\[(]|[\\])]$", "");
+    int start = cell.startsWith("[") || cell.startsWith("(") ? 1 : 0;
+    int end = cell.endsWith("]") || cell.endsWith(")") ? cell.length() - 1 : cell.length();
+    return start < end ? cell.substring(start, end).strip() : "";
   }
 
   private static void refuseNumbers(Sheet sheet, Sheet.Row row) {

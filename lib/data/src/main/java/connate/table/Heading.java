@@ -8,8 +8,6 @@ import connate.role.Roles;
 import connate.series.Unstated;
 import java.util.List;
 import java.util.Optional;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
 
 /**
  * A column's heading: its name, and the unit that stands with it.
@@ -23,7 +21,6 @@ record Heading(String name, String symbol, Unit<?> unit) {
   /** Caution: a unit that is not known. */
   static final String UNKNOWN = "T21";
 
-  private static final Pattern TRAILING = Pattern.compile("(.+?)(?:, ?| / | (?=%))([^ ,]+)");
   private static final List<String> NO_UNIT = List.of("", "-", "none", "_", "n/a");
 
   /** Reads a heading such as {@code porosity [%]}, {@code depth (m)} or {@code depth, m}. */
@@ -38,22 +35,39 @@ record Heading(String name, String symbol, Unit<?> unit) {
     boolean square = text.charAt(open) == '[';
     boolean counts = !Double.isNaN(Cells.number(symbol, false)); // AMC[0], AMC[1], k (2)
     boolean one = square && symbol.equals("1") && text.charAt(open - 1) == ' ';
-    return counts && !one || !square && find(name, symbol).isEmpty()
+    return counts && !one || !square && likely(name, symbol).isEmpty()
         ? new Heading(text, "", Unstated.UNIT)
         : with(file, name, symbol);
   }
 
   /** A unit behind a comma, a stroke or, for a percentage, a blank; else all is the name. */
   private static Heading trailing(String text) {
-    Matcher parts = TRAILING.matcher(text);
-    if (parts.matches()) {
-      String symbol = parts.group(2).strip();
-      Optional<Unit<?>> unit = find(parts.group(1), symbol);
+    int sign = Math.max(text.lastIndexOf(','), text.lastIndexOf(" / ") + 1);
+    int end = text.endsWith(" %") ? text.length() - 2 : sign;
+    String symbol = end > 0 ? text.substring(end + 1).strip() : "";
+    if (!symbol.isEmpty() && symbol.indexOf(' ') < 0) {
+      String name = text.substring(0, end).strip();
+      Optional<Unit<?>> unit = likely(name, symbol);
       if (unit.isPresent()) {
-        return new Heading(parts.group(1).strip(), symbol, unit.get());
+        return new Heading(name, symbol, unit.get());
       }
     }
     return new Heading(text, "", Unstated.UNIT);
+  }
+
+  /** Without square brackets a letter is a unit only if it is written as one: no sample (S). */
+  private static Optional<Unit<?>> likely(String name, String symbol) {
+    Optional<Role> role = Roles.find(name, symbol);
+    if (role.isPresent() && role.get().unit() != null && role.get().unit(symbol).isPresent()) {
+      return role.get().unit(symbol);
+    }
+    boolean letter = symbol.length() == 1 && Character.isLetter(symbol.charAt(0));
+    return find(name, symbol)
+        .filter(u -> (!letter || symbol.equals(u.symbol())) && !isOfWords(role));
+  }
+
+  private static boolean isOfWords(Optional<Role> role) {
+    return role.filter(r -> ColumnReader.WORDS.contains(r.name())).isPresent();
   }
 
   /** Returns a heading with a unit from a row of units, or from the workbook. */

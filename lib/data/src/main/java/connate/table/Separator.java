@@ -27,9 +27,9 @@ final class Separator {
   static char of(String text) {
     List<String> lines = first(text);
     char best = ',';
-    long most = 0;
+    int most = 0;
     for (char candidate : KNOWN) {
-      long alike = alike(lines, candidate);
+      int alike = alike(lines, candidate);
       if (alike > most) {
         most = alike;
         best = candidate;
@@ -55,7 +55,7 @@ final class Separator {
     return lines;
   }
 
-  private static long alike(List<String> lines, char separator) {
+  private static int alike(List<String> lines, char separator) {
     Map<Integer, Integer> counts = new HashMap<>();
     for (String line : lines) {
       int found = count(line, separator);
@@ -63,7 +63,11 @@ final class Separator {
         counts.merge(found, 1, Integer::sum);
       }
     }
-    return counts.values().stream().mapToInt(Integer::intValue).max().orElse(0);
+    int most = 0;
+    for (int count : counts.values()) {
+      most = Math.max(most, count);
+    }
+    return most;
   }
 
   /** Returns how often the separator stands in a line outside of quotes; inches quote nothing. */

@@ -184,6 +184,9 @@ class CsvCasesTest {
         List.of("AMC[0]", "AMC[1]", "offset (1km)", "k (2)"),
         read("AMC[0],AMC[1],offset (1km),k (2)\n1,2,3,4\n").names());
     assertEquals("T21", told("a [furlong],b\n1,2\n"));
+    assertEquals(
+        List.of("sample (S)", "well (D)", "note"),
+        read("sample (S),well (D),\"note, s\"\na,b,c\nd,e,f\n").names());
   }
 
   @Test
@@ -263,6 +266,7 @@ class CsvCasesTest {
   void unitInTheHeaderMeansNumbersWhateverTheMajority() {
     Fault f = fault("well,k [mD]\nA,tight\nB,tight\nC,12\n");
     assertEquals("T04", f.code());
+    assertEquals("T23", told("well,k [mD]\nA,tight\nB,tight\n"));
     assertEquals("T23", told("well,porosity\nA,tight\nB,tight\nC,12\n"));
   }
 
@@ -274,7 +278,7 @@ class CsvCasesTest {
 
   @Test
   void cellsOnLaterLinesOfARowAreFound() {
-    Fault f = fault("note,size [m],v [m]\n\"two\nlines; \"\"quoted\"\"\", 7 ,x\n");
+    Fault f = fault("note,size [m],v [m]\n\"two\nlines; \"\"quoted\"\"\", 7 ,x\nb,8,9\n");
     assertEquals("plugs.csv:3:24", f.place());
     assertEquals("lines; \"\"quoted\"\"\", 7 ,x", f.text());
   }
