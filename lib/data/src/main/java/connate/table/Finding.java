@@ -58,6 +58,13 @@ final class Finding {
     return -1;
   }
 
+  /** The role that a column's name and unit fit best, empty where they fit none. */
+  String role(Column column) {
+    boolean unit = column.isNumeric() && !column.numbers().unit().equals(Unstated.UNIT);
+    String symbol = unit ? column.numbers().unit().symbol() : "";
+    return Roles.find(column.name(), symbol).map(Role::name).orElse("");
+  }
+
   /** The column of depth in a unit of length, where there is one. */
   Optional<Series> depth() {
     return Roles.named("depth").stream()

@@ -319,14 +319,18 @@ public final class Table implements Listed {
     return TablesawView.of(this);
   }
 
-  /** Returns what a column was read as, in a few words. */
+  /** Returns what a column was read as, in a few words: its unit and what it stands for. */
   public String describe(String column) {
     Column found = finding.wanted(column);
+    String role = finding.role(found);
+    String stands =
+        role.isEmpty() || role.equals(Finding.key(found.name())) ? "" : " (" + role + ")";
     if (!found.isNumeric()) {
-      return found.name() + ": words";
+      return found.name() + ": words" + stands;
     }
     Unit<?> unit = found.numbers().unit();
-    return found.name() + (unit.equals(Unstated.UNIT) ? ": numbers, no unit" : " in " + unit);
+    boolean none = unit.equals(Unstated.UNIT);
+    return found.name() + (none ? ": numbers, no unit" : " in " + unit) + stands;
   }
 
   List<Column> columns() {

@@ -106,6 +106,16 @@ class TableOperationsTest {
   }
 
   @Test
+  void describesWhatAColumnStandsFor() {
+    Table t = read("well,Depth [m],k_air [mD],phi,note\nA,1,2,0.1,x\n");
+    assertEquals("k_air in mD (permeability)", t.describe("k_air"));
+    assertEquals("phi: numbers, no unit (porosity)", t.describe("phi"));
+    assertEquals("Depth in m", t.describe("depth"));
+    assertEquals("well: words", t.describe("well"));
+    assertEquals("note: words", t.describe("note"));
+  }
+
+  @Test
   void formulasAreWrittenAsWords() {
     assertTrue(read("w,v\n\"=1+1\",-5\n").csv().contains("'=1+1,-5"));
   }
