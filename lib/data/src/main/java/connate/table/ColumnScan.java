@@ -30,6 +30,9 @@ final class ColumnScan {
 
   /** The column's own numbers decide; only where they are silent, the file's. */
   private boolean decimalComma(boolean file) {
+    if (!file && !hasComma()) {
+      return false;
+    }
     int commas = 0;
     int points = 0;
     for (Sheet.Row row : rows) {
@@ -38,6 +41,15 @@ final class ColumnScan {
       points += says < 0 ? 1 : 0;
     }
     return commas == points ? file : commas > points;
+  }
+
+  private boolean hasComma() {
+    for (Sheet.Row row : rows) {
+      if (row.cell(column).indexOf(',') >= 0) {
+        return true;
+      }
+    }
+    return false;
   }
 
   private double look(int row) {
