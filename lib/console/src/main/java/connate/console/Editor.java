@@ -73,6 +73,7 @@ final class Editor implements AutoCloseable {
           .provider("jni")
           .encoding(StandardCharsets.UTF_8)
           .dumb(true)
+          .graphemeCluster(false)
           .build();
     } catch (IOException e) {
       throw new UncheckedIOException(e);
