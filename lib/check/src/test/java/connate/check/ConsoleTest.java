@@ -32,7 +32,7 @@ class ConsoleTest {
   @Test
   void completesNamesFilesAndColumns() {
     try (Pane pane = Pane.open(folder)) {
-      pane.await("> ");
+      pane.await("\n>");
       pane.type("var plugs = tabl").press("Tab").await("table(");
       pane.type("\"core").press("Tab").await("\"core-plugs.csv\"");
       pane.enter(");").await("5 rows");
@@ -45,10 +45,10 @@ class ConsoleTest {
   @Test
   void entersMethodsOverSeveralLinesAndFindsThemAgain() {
     try (Pane pane = Pane.open(folder)) {
-      pane.await("> ");
+      pane.await("\n>");
       pane.enter("int twice(int x) {").enter("  return 2 * x;").enter("}");
       pane.enter("twice(21)").await("42");
-      pane.enter("var other = 1;").await("other = 1");
+      pane.enter("var other = 1;").await("\nother = 1");
       pane.press("C-r").type("twice(2").await("twice(21)");
       pane.press("Enter").enter("other + 2").await("\n3");
     }
@@ -61,7 +61,7 @@ class ConsoleTest {
             .mapToObj(i -> "keep(\"n" + i + "\", " + i + ");")
             .collect(Collectors.joining("\n"));
     try (Pane pane = Pane.open(folder)) {
-      pane.await("> ");
+      pane.await("\n>");
       pane.paste(ten).press("Enter").await("kept n10: 10");
       assertTrue(pane.screen().contains("kept n1: 1"), pane.screen());
     }
@@ -70,8 +70,8 @@ class ConsoleTest {
   @Test
   void stopsWhatNeverEndsAndKeepsTheState() {
     try (Pane pane = Pane.open(folder)) {
-      pane.await("> ");
-      pane.enter("var kept = 7;").await("kept = 7");
+      pane.await("\n>");
+      pane.enter("var kept = 7;").await("\nkept = 7");
       pane.enter("while (true) {}").press("Enter");
       whileBusy(pane);
       pane.press("C-c").await("stopped; what was declared before is still there");
@@ -98,8 +98,8 @@ class ConsoleTest {
   @Test
   void engineThatIsKilledCostsNothing() {
     try (Pane pane = Pane.open(folder)) {
-      pane.await("> ");
-      pane.enter("var a = 40;").await("a = 40");
+      pane.await("\n>");
+      pane.enter("var a = 40;").await("\na = 40");
       for (int i = 1; i <= 3; i++) {
         pane.engine().destroyForcibly();
         pane.enter("a + " + i).await("\n" + (40 + i));
@@ -110,8 +110,8 @@ class ConsoleTest {
   @Test
   void sessionOfAKilledConsoleComesBack() {
     try (Pane pane = Pane.open(folder)) {
-      pane.await("> ");
-      pane.enter("/// # A try").enter("var a = 40;").await("a = 40");
+      pane.await("\n>");
+      pane.enter("/// # A try").enter("var a = 40;").await("\na = 40");
       pane.enter("while (true) {}");
       whileBusy(pane);
       pane.kill();
@@ -121,17 +121,17 @@ class ConsoleTest {
       pane.press("y").press("Enter").await("it is back: 2 entries");
       assertTrue(pane.screen().contains("is not run again: while (true) {}"), pane.screen());
       pane.enter("a + 2").await("\n42");
-      pane.press("C-d");
+      pane.leave();
     }
     try (Pane pane = Pane.open(folder)) {
-      assertFalse(pane.await("> ").contains(BACK), "an ended session is not offered again");
+      assertFalse(pane.await("\n>").contains(BACK), "an ended session is not offered again");
     }
   }
 
   @Test
   void savesAndReplaysToTheSameResultsWithAFigure() throws IOException {
     try (Pane pane = Pane.open(folder)) {
-      pane.await("> ");
+      pane.await("\n>");
       pane.enter("/// # First look");
       pane.enter("var plugs = table(\"core-plugs.csv\");").await("5 rows");
       pane.enter("var fit = LogLinear.fit(plugs.get(\"porosity\"), plugs.get(\"k_air\"));");
@@ -141,14 +141,14 @@ class ConsoleTest {
       pane.enter("no.such(1)").await("error:");
       pane.enter("keep(\"slope\", fit.slope());").await("kept slope: ");
       pane.enter("save(\"first.jsh\")").await("saved first.jsh");
-      pane.press("C-d");
+      pane.leave();
     }
     String saved = Files.readString(folder.resolve("first.jsh"));
     assertTrue(saved.startsWith("/// # First look\n\nvar plugs"), saved);
     assertFalse(saved.contains("no.such"), saved);
     try (Pane pane = Pane.open(folder, "first.jsh")) {
       String slope = slope(pane.await("kept slope: "));
-      pane.await("first> ");
+      pane.await("\nfirst>");
       pane.enter("results()").await("  slope: ");
       assertEquals(
           "20.87", slope, "regression: five invented plugs, fitted in an engine of its own");
@@ -162,8 +162,8 @@ class ConsoleTest {
   @Test
   void windowMayChangeItsSizeAndHelpFits() {
     try (Pane pane = Pane.open(folder)) {
-      pane.await("> ");
-      pane.enter("var a = 1;").await("a = 1");
+      pane.await("\n>");
+      pane.enter("var a = 1;").await("\na = 1");
       pane.resize(50, 20).enter("help()").await("help(\"…\") tells");
       pane.await("From a file to a figure:");
       int widest = pane.screen().lines().mapToInt(String::length).max().orElse(0);

@@ -11,7 +11,7 @@ import java.util.stream.Collectors;
 /** A console in a terminal that a test types into and reads, by way of tmux. */
 final class Pane implements AutoCloseable {
 
-  private static final long PATIENCE_NANOS = TimeUnit.SECONDS.toNanos(60);
+  private static final long PATIENCE_NANOS = TimeUnit.SECONDS.toNanos(20);
 
   private final String socket;
   private final Path folder;
@@ -124,6 +124,13 @@ final class Pane implements AutoCloseable {
   void kill() {
     ProcessHandle kernel = kernel();
     kernel.destroyForcibly();
+    kernel.onExit().join();
+  }
+
+  /** Leaves the console and waits until it has ended. */
+  void leave() {
+    ProcessHandle kernel = kernel();
+    press("C-d");
     kernel.onExit().join();
   }
 
