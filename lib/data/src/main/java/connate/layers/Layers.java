@@ -119,12 +119,12 @@ public final class Layers implements Listed {
 
   /** Returns the mean permeability for flow along the layers. */
   public Estimate<Permeability> arithmetic(String curve) {
-    return permeability(curve, Weighted::arithmetic);
+    return permeability(curve, Weighted::along);
   }
 
   /** Returns the mean permeability for flow across the layers. */
   public Estimate<Permeability> harmonic(String curve) {
-    Estimate<Permeability> k = permeability(curve, Weighted::harmonic);
+    Estimate<Permeability> k = permeability(curve, Weighted::across);
     if (k.value().si() == 0) {
       Listening.caution(
           Caution.of(
@@ -214,9 +214,9 @@ public final class Layers implements Listed {
         Units.percent(100 * ratio),
         Fraction.of(phi.arithmetic(), Units.fraction),
         Units.m(phi.sumOfProducts()),
-        Units.mD(k.arithmetic()),
-        Units.mD(k.harmonic()),
-        k.harmonic() / k.arithmetic(),
+        Units.mD(k.along()),
+        Units.mD(k.across()),
+        k.across() / k.along(),
         Units.mDm(k.sumOfProducts()));
   }
 

@@ -1,5 +1,7 @@
 package connate.layers;
 
+import connate.averages.Averages;
+
 /** Values with the thickness that each stands for. */
 record Weighted(double[] values, double[] thickness) {
 
@@ -23,30 +25,23 @@ record Weighted(double[] values, double[] thickness) {
     return sum;
   }
 
+  /** Returns the mean for flow along, or of any other quantity. */
   double arithmetic() {
     return sumOfProducts() / total();
   }
 
-  /** Zero as soon as one value is: flow across a tight bed stops. */
-  double harmonic() {
-    double sum = 0;
-    for (int i = 0; i < values.length; i++) {
-      if (values[i] <= 0) {
-        return 0;
-      }
-      sum += thickness[i] / values[i];
-    }
-    return total() / sum;
+  /** Returns the mean permeability for flow along. */
+  double along() {
+    return Averages.arithmetic(values, thickness);
   }
 
+  /** Returns the mean permeability for flow across. */
+  double across() {
+    return Averages.harmonic(values, thickness);
+  }
+
+  /** Returns the geometric mean permeability. */
   double geometric() {
-    double sum = 0;
-    for (int i = 0; i < values.length; i++) {
-      if (values[i] <= 0) {
-        return 0;
-      }
-      sum += thickness[i] * StrictMath.log(values[i]);
-    }
-    return StrictMath.exp(sum / total());
+    return Averages.geometric(values, thickness);
   }
 }
