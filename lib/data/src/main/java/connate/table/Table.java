@@ -142,6 +142,11 @@ public final class Table implements Listed {
     return finding.depth().filter(d -> d != series).map(series::atDepth).orElse(series);
   }
 
+  /** Returns all columns of numbers, in their order. */
+  public List<Series> series() {
+    return columns.stream().filter(Column::isNumeric).map(column -> get(column.name())).toList();
+  }
+
   /**
    * Returns a column of words.
    *
