@@ -1,6 +1,7 @@
 package connate.console;
 
 import connate.file.AtomicFile;
+import connate.picture.PictureTerminal;
 import connate.protocol.Event;
 import connate.protocol.Item;
 import connate.record.Versions;
@@ -66,6 +67,7 @@ public final class Console {
     }
     Map<String, String> environment = System.getenv();
     Path state = StateFolder.of(environment, System.getProperty("user.home"));
+    System.setProperty("java.awt.headless", "true");
     Console console = new Console(parsed, environment, state, Path.of("").toAbsolutePath());
     return isTerminal() ? console.talk(Editor.system()) : console.pipe();
   }
@@ -80,7 +82,7 @@ public final class Console {
   int talk(Terminal terminal) {
     boolean dumb = terminal.getType().startsWith(Terminal.TYPE_DUMB);
     Ink ink = Ink.of(environment, !dumb, arguments.coloured());
-    start(new Screen(terminal.writer(), () -> terminal.getSize().getColumns(), ink, !dumb));
+    start(new Screen(terminal.writer(), () -> terminal.getSize().getColumns(), ink, !dumb), !dumb);
     Optional<Journals.Lost> lost = arguments.asks() ? journals.lost() : Optional.empty();
     if (lost.isEmpty()) {
       begin(arguments.workbook());
@@ -177,7 +179,7 @@ public final class Console {
 
   private int pipe() {
     PrintWriter out = new PrintWriter(System.out, true, StandardCharsets.UTF_8);
-    start(new Screen(out, () -> 100, Ink.none(), false));
+    start(new Screen(out, () -> 100, Ink.none(), false), false);
     begin(arguments.workbook());
     boolean[] stopped = {false};
     Object before =
@@ -229,14 +231,15 @@ public final class Console {
 
   // ---- sessions
 
-  private void start(Screen shown) {
+  private void start(Screen shown, boolean moving) {
     screen = shown;
     long now = Instant.now().toEpochMilli();
     printer =
         new Printer(
             screen,
             new FigureFiles(
-                state.resolve("figures").resolve(now + "-" + ProcessHandle.current().pid())));
+                state.resolve("figures").resolve(now + "-" + ProcessHandle.current().pid())),
+            moving ? PictureTerminal.of(environment) : Optional.empty());
   }
 
   private void begin(Path workbook) {

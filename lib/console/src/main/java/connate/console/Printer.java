@@ -1,9 +1,13 @@
 package connate.console;
 
+import connate.log.SvgGate;
 import connate.log.Values;
+import connate.picture.PictureTerminal;
+import connate.picture.Raster;
 import connate.protocol.Event;
 import connate.protocol.Item;
 import connate.text.ItemText;
+import java.awt.image.BufferedImage;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -18,9 +22,11 @@ final class Printer {
 
   private final Screen screen;
   private final FigureFiles figures;
+  private final Optional<PictureTerminal> terminal;
   private long start = System.nanoTime();
 
-  Printer(Screen screen, FigureFiles figures) {
+  Printer(Screen screen, FigureFiles figures, Optional<PictureTerminal> terminal) {
+    this.terminal = terminal;
     this.screen = screen;
     this.figures = figures;
   }
@@ -87,6 +93,10 @@ final class Printer {
   }
 
   private void item(String name, Item item) {
+    if (item instanceof Item.Picture picture && drawn(picture)) {
+      file(picture);
+      return;
+    }
     List<String> lines = screen.setter().lines(name.isEmpty() ? item : brief(item));
     if (name.isEmpty() || item instanceof Item.Grid || item instanceof Item.Group) {
       lines.forEach(screen::line);
@@ -97,6 +107,22 @@ final class Printer {
       lines.forEach(screen::line);
     }
     pictures(item).forEach(this::file);
+  }
+
+  /**
+   * Shows a figure as a picture; returns false where the terminal or the figure does not let us.
+   */
+  private boolean drawn(Item.Picture picture) {
+    if (terminal.isEmpty()) {
+      return false;
+    }
+    try {
+      BufferedImage image = Raster.of(SvgGate.pass(picture.svg()), 1);
+      screen.line(terminal.get().sequence(image));
+      return true;
+    } catch (IllegalArgumentException e) {
+      return false;
+    }
   }
 
   private static List<Item.Picture> pictures(Item item) {
