@@ -9,21 +9,22 @@ import java.awt.geom.Ellipse2D;
 import java.awt.geom.Line2D;
 import java.awt.geom.Rectangle2D;
 import java.awt.image.BufferedImage;
-import java.io.StringReader;
 import java.util.ArrayDeque;
 import java.util.Deque;
 import java.util.HashMap;
 import java.util.Map;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
-import javax.xml.stream.XMLInputFactory;
-import javax.xml.stream.XMLStreamConstants;
-import javax.xml.stream.XMLStreamException;
-import javax.xml.stream.XMLStreamReader;
 
 /** Draws a figure's SVG as dots. It knows what our own figures hold, and leaves out the rest. */
 public final class Raster {
 
+  private static final Pattern PART =
+      Pattern.compile(
+          "<(?<end>/?)(?<name>\\w+)(?<attributes>(?:\\s+[\\w:-]+=\"[^\"]*\")*)\\s*(?<empty>/?)>"
+              + "|(?<text>[^<]+)");
+  private static final Pattern ATTRIBUTE = Pattern.compile("([\\w:-]+)=\"([^\"]*)\"");
+  private static final Pattern ENTITY = Pattern.compile("&(amp|lt|gt|quot|apos|#x?\\w+);");
   private static final Pattern CALL = Pattern.compile("(translate|rotate|scale)\\(([^)]*)\\)");
 
   private final Graphics2D graphics;
@@ -49,51 +50,85 @@ public final class Raster {
    */
   public static BufferedImage of(String svg, double scale) {
     try {
-      XMLInputFactory factory = XMLInputFactory.newFactory();
-      factory.setProperty(XMLInputFactory.SUPPORT_DTD, false);
-      factory.setProperty(XMLInputFactory.IS_COALESCING, true);
-      XMLStreamReader reader = factory.createXMLStreamReader(new StringReader(svg));
-      reader.nextTag();
+      Matcher root = PART.matcher(svg.strip());
+      if (!root.lookingAt() || !"svg".equals(root.group("name"))) {
+        throw new IllegalArgumentException("it does not begin with <svg");
+      }
+      Map<String, String> own = attributes(root.group("attributes"));
       BufferedImage image =
           new BufferedImage(
-              (int) Math.ceil(scale * Double.parseDouble(reader.getAttributeValue(null, "width"))),
-              (int) Math.ceil(scale * Double.parseDouble(reader.getAttributeValue(null, "height"))),
+              (int) Math.ceil(scale * Double.parseDouble(own.get("width"))),
+              (int) Math.ceil(scale * Double.parseDouble(own.get("height"))),
               BufferedImage.TYPE_INT_RGB);
-      Graphics2D graphics = image.createGraphics();
-      graphics.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
-      graphics.setRenderingHint(
-          RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
-      graphics.setColor(Color.WHITE);
-      graphics.fillRect(0, 0, image.getWidth(), image.getHeight());
+      Graphics2D graphics = paper(image);
       graphics.scale(scale, scale);
-      new Raster(graphics).draw(reader);
+      new Raster(graphics).draw(svg.strip());
       graphics.dispose();
       return image;
-    } catch (XMLStreamException | RuntimeException e) {
+    } catch (RuntimeException e) {
       throw new IllegalArgumentException("the figure cannot be drawn: " + e.getMessage(), e);
     }
   }
 
-  private void draw(XMLStreamReader reader) throws XMLStreamException {
-    int event = reader.getEventType();
-    while (event != XMLStreamConstants.END_DOCUMENT) {
-      if (event == XMLStreamConstants.START_ELEMENT) {
-        start(reader.getLocalName(), attributes(reader));
-      } else if (event == XMLStreamConstants.END_ELEMENT) {
-        end(reader.getLocalName());
-      } else if (event == XMLStreamConstants.CHARACTERS && !states.isEmpty()) {
-        letters(reader.getText());
+  private static Graphics2D paper(BufferedImage image) {
+    Graphics2D graphics = image.createGraphics();
+    graphics.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
+    graphics.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
+    graphics.setColor(Color.WHITE);
+    graphics.fillRect(0, 0, image.getWidth(), image.getHeight());
+    return graphics;
+  }
+
+  private void draw(String svg) {
+    Matcher part = PART.matcher(svg);
+    int done = 0;
+    while (done < svg.length()) {
+      if (!part.find(done) || part.start() != done) {
+        throw new IllegalArgumentException("stray text at " + done);
       }
-      event = reader.next();
+      done = part.end();
+      if (part.group("text") != null) {
+        letters(plain(part.group("text")));
+      } else if (part.group("end").isEmpty()) {
+        start(part.group("name"), attributes(part.group("attributes")));
+        if (!part.group("empty").isEmpty()) {
+          end(part.group("name"));
+        }
+      } else {
+        end(part.group("name"));
+      }
     }
   }
 
-  private static Map<String, String> attributes(XMLStreamReader reader) {
+  private static Map<String, String> attributes(String text) {
     Map<String, String> all = new HashMap<>();
-    for (int i = 0; i < reader.getAttributeCount(); i++) {
-      all.put(reader.getAttributeLocalName(i), reader.getAttributeValue(i));
+    Matcher attribute = ATTRIBUTE.matcher(text);
+    while (attribute.find()) {
+      all.put(attribute.group(1), plain(attribute.group(2)));
     }
     return all;
+  }
+
+  /** Returns text without the five entities and the numbered ones. */
+  private static String plain(String text) {
+    return text.indexOf('&') < 0
+        ? text
+        : ENTITY.matcher(text).replaceAll(m -> Matcher.quoteReplacement(letter(m.group(1))));
+  }
+
+  private static String letter(String name) {
+    return switch (name) {
+      case "amp" -> "&";
+      case "lt" -> "<";
+      case "gt" -> ">";
+      case "quot" -> "\"";
+      case "apos" -> "'";
+      default ->
+          Character.toString(
+              name.startsWith("#x")
+                  ? Integer.parseInt(name.substring(2), 16)
+                  : Integer.parseInt(name.substring(1)));
+    };
   }
 
   private void start(String name, Map<String, String> own) {
