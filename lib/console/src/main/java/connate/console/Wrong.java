@@ -17,6 +17,11 @@ import jdk.jshell.SourceCodeAnalysis.Suggestion;
 final class Wrong {
 
   private static final Pattern PLACE = Pattern.compile("^[^\\n]*?: error\\[\\w+\\]: ");
+
+  /** What stands before names that the user wrote without it: the shell's class, java.lang. */
+  private static final Pattern OWNER =
+      Pattern.compile("REPL\\.\\$JShell\\$\\w+\\.|\\bjava\\.(?:lang|util)\\.(?=[A-Z])");
+
   private static final Pattern UNKNOWN =
       Pattern.compile("no [a-z ]+ «(\\w+)(?:\\(.*\\))?» is known");
 
@@ -33,7 +38,8 @@ final class Wrong {
         new Complaint(workbook)
             .of(flaw.code(), flaw.text(), from, flaw.to() - from, workbook.commands().get(0))
             .message();
-    String plain = PLACE.matcher(message).replaceFirst("error: ");
+    String bare = OWNER.matcher(message).replaceAll("");
+    String plain = PLACE.matcher(bare).replaceFirst("error: ");
     return plain.contains("did you mean") ? plain : plain + near(plain, source, from, analysis);
   }
 
@@ -105,7 +111,8 @@ final class Wrong {
           case "NoSuchElementException" -> "there is none";
           default -> type;
         };
-    return failed.message().isEmpty() ? "error: " + words : words + ": " + failed.message();
+    String message = OWNER.matcher(failed.message()).replaceAll("");
+    return message.isEmpty() ? "error: " + words : words + ": " + message;
   }
 
   /** Returns where a failure happened, innermost first. */
