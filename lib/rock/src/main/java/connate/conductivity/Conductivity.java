@@ -111,7 +111,8 @@ public final class Conductivity {
   }
 
   /**
-   * Returns every formula for each curve, those outside their range marked.
+   * Returns every formula for each curve, those outside their range marked. No formula is made for
+   * cohesive soil: more than 10 % finer than 2 µm is marked throughout (common practice, no source).
    *
    * @param porosity one porosity, or a column with one for each curve
    */
@@ -168,6 +169,7 @@ public final class Conductivity {
     double[] kruger = EffectiveDiameter.kruger(curves).values();
     double[] zunker = EffectiveDiameter.zunker(curves).values();
     double[] zamarin = EffectiveDiameter.zamarin(curves).values();
+    double[] clay = curves.finer(Units.um(2)).values();
     double celsius = temperature.in(Units.degC);
     Sand[] sands = new Sand[curves.size()];
     for (int i = 0; i < sands.length; i++) {
@@ -181,6 +183,7 @@ public final class Conductivity {
               kruger[i],
               zunker[i],
               zamarin[i],
+              clay[i],
               n[i],
               celsius);
     }

@@ -16,6 +16,7 @@ record Entry(
 
   /** Returns what is outside the formula's range, empty where nothing is. */
   String outside(Sand sand) {
-    return Outside.both(Outside.inputs(card, sand), beyond.apply(sand));
+    String range = Outside.both(Outside.inputs(card, sand), beyond.apply(sand));
+    return Outside.both(range, Outside.clay(sand));
   }
 }

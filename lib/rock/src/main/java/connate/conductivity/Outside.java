@@ -7,6 +7,9 @@ import connate.quantity.Numbers;
 /** Says what of a sand is outside the range of a formula. */
 final class Outside {
 
+  /** Per cent finer than 2 µm; common practice, no source. */
+  private static final double MOST_CLAY = 10;
+
   private Outside() {}
 
   static String uniformity(Sand sand, double low, double high) {
@@ -15,6 +18,10 @@ final class Outside {
 
   static String median(Sand sand, double low, double high) {
     return text("d50", sand.d50(), low, high, " mm");
+  }
+
+  static String clay(Sand sand) {
+    return text("clay", sand.clay(), 0, MOST_CLAY, " %");
   }
 
   private static String text(String name, double value, double low, double high, String unit) {

@@ -1,6 +1,6 @@
 package connate.conductivity;
 
-/** One sand as the formulas see it: sizes in mm, porosity, temperature of the water. */
+/** One sand as the formulas see it: sizes in mm, clay in percent, porosity, water. */
 record Sand(
     double d10,
     double d17,
@@ -10,6 +10,7 @@ record Sand(
     double deKruger,
     double deZunker,
     double deZamarin,
+    double clay,
     double n,
     double celsius) {
 

@@ -126,6 +126,29 @@ class ConductivityTest {
     assertThrows(IllegalArgumentException.class, () -> clay.within().geometricMean());
   }
 
+  /** A soil with 15 % finer than 2 µm is cohesive: no formula counts, and the table says why. */
+  @Test
+  void clayeySoilIsMarkedThroughout() {
+    GrainCurve soil =
+        GrainCurve.of(
+            Series.of("d", Units.mm, 0.0001, 0.002, 0.063, 0.25, 0.5),
+            Series.of("soil", Units.percent, 15, 25, 40, 20));
+    ConductivityTable table = Conductivity.all(soil, percent(40), degC(10));
+    for (String formula : table.formulas()) {
+      assertTrue(table.outside(formula, 0).contains("clay 15 above 10 %"), formula);
+    }
+    assertThrows(IllegalArgumentException.class, () -> table.within().geometricMean());
+  }
+
+  /** A conductivity is no permeability: m² where m/s is meant is refused, and the other way round. */
+  @Test
+  void conductivityIsNoPermeability() {
+    Series k = Series.of("k", Units.squareMetres, 1e-12);
+    assertThrows(
+        IllegalArgumentException.class,
+        () -> Conductivity.permeability(k, Units.mPaS(1), Units.gPerCm3(1)));
+  }
+
   @Test
   void manySandsAndTheirPorosity() {
     GrainCurves curves = GrainCurves.of(FINE, COARSE);
