@@ -118,6 +118,8 @@ final class Burial {
         between / bulk,
         cement / bulk,
         porosity,
-        porosity > 0 ? rule.squareMetres(porosity, between / bulk, grain) : 0);
+        porosity > 0
+            ? rule.squareMetres(porosity, between / bulk, grain, settings.of(Input.SORTING))
+            : 0);
   }
 }

@@ -5,7 +5,6 @@ import connate.chance.Draw;
 import connate.chance.Uncertain;
 import connate.method.Caution;
 import connate.method.Listening;
-import connate.permeability.KozenyCarman;
 import connate.quantity.Fraction;
 import connate.quantity.Temperature;
 import connate.quantity.Units;
@@ -29,10 +28,10 @@ import java.util.Map;
  * The open quartz surface goes with the share of that volume that is still open. Cementing stops at
  * the residual porosity.
  *
- * <p>Uncertain inputs go by name: {@code grain size} in µm, {@code quartz}, {@code coat}, {@code
- * initial porosity}, {@code stable volume} as fractions, {@code compaction} (the coefficient of the
- * law), {@code rate} (a factor on the rate of quartz cement), {@code onset} in °C, {@code residual}
- * as a fraction.
+ * <p>Uncertain inputs go by name: {@code grain size} in µm, {@code sorting} (for the permeability
+ * of Panda and Lake alone), {@code quartz}, {@code coat}, {@code initial porosity}, {@code stable
+ * volume} as fractions, {@code compaction} (the coefficient of the law), {@code rate} (a factor on
+ * the rate of quartz cement), {@code onset} in °C, {@code residual} as a fraction.
  *
  * <p><b>Checked</b> in {@code BurialModelTest}.
  */
@@ -161,7 +160,7 @@ public final class BurialModel {
   public BurialPath along(BurialHistory history) {
     Listening.used(law.card());
     Listening.used(Walderhaug.CARD);
-    Listening.used(rule == PermeabilityRule.GARN ? Garn.CARD : KozenyCarman.CARD);
+    Listening.used(rule.card());
     return new Burial(law, rule, settings).along(history);
   }
 

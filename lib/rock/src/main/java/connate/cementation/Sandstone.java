@@ -11,20 +11,29 @@ import java.util.Objects;
 /**
  * A sandstone as it was laid down.
  *
- * @param grain the size of its grains, without overgrowth
+ * @param grain the median size of its grains by weight, without overgrowth
+ * @param sorting Trask's measure
  * @param quartz the share of quartz of the grains
  * @param coat the share of the quartz surface that a clay coat covers
  * @param initial the porosity at deposition
  * @param stable the intergranular volume that high stress leaves
  */
 public record Sandstone(
-    Length grain, Fraction quartz, Fraction coat, Fraction initial, Fraction stable) {
+    Length grain,
+    Ratio sorting,
+    Fraction quartz,
+    Fraction coat,
+    Fraction initial,
+    Fraction stable) {
 
   /** Checks the ranges. */
   public Sandstone {
     Objects.requireNonNull(grain, "grain");
     if (!(grain.metres() > 0)) {
       throw new IllegalArgumentException("a grain size is above zero, found " + grain);
+    }
+    if (!(sorting.value() >= 1)) {
+      throw new IllegalArgumentException("a Trask sorting is at least 1, found " + sorting);
     }
     checkPart("quartz", quartz, 1);
     checkPart("coat", coat, 1);
@@ -49,6 +58,7 @@ public record Sandstone(
   public static Sandstone of(Length grain, Ratio sorting, Fraction quartz) {
     return new Sandstone(
         grain,
+        sorting,
         quartz,
         Units.fraction(0),
         SchererInitial.of(sorting),
@@ -57,17 +67,17 @@ public record Sandstone(
 
   /** Returns the sandstone with clay coats over a share of the quartz surface. */
   public Sandstone coated(Fraction share) {
-    return new Sandstone(grain, quartz, share, initial, stable);
+    return new Sandstone(grain, sorting, quartz, share, initial, stable);
   }
 
   /** Returns the sandstone with another porosity at deposition. */
   public Sandstone withInitialPorosity(Fraction porosity) {
-    return new Sandstone(grain, quartz, coat, porosity, stable);
+    return new Sandstone(grain, sorting, quartz, coat, porosity, stable);
   }
 
   /** Returns the sandstone with another stable volume: ductile grains lower it to some 10 %. */
   public Sandstone withStableVolume(Fraction volume) {
-    return new Sandstone(grain, quartz, coat, initial, volume);
+    return new Sandstone(grain, sorting, quartz, coat, initial, volume);
   }
 
   @Override

@@ -13,6 +13,7 @@ final class Settings {
   /** What may be set, with its unit and what is possible. */
   enum Input {
     GRAIN_SIZE(Units.um, 1, 5000),
+    SORTING(Units.number, 1, 6),
     QUARTZ(Units.fraction, 0, 1),
     COAT(Units.fraction, 0, 1),
     INITIAL_POROSITY(Units.fraction, 0.05, 0.7),
@@ -90,6 +91,7 @@ final class Settings {
     return new Settings(
         new double[] {
           Input.GRAIN_SIZE.checked(sand.grain().in(Units.um)),
+          Input.SORTING.checked(sand.sorting().value()),
           sand.quartz().fraction(),
           sand.coat().fraction(),
           Input.INITIAL_POROSITY.checked(sand.initial().fraction()),

@@ -112,7 +112,8 @@ public final class Conductivity {
 
   /**
    * Returns every formula for each curve, those outside their range marked. No formula is made for
-   * cohesive soil: more than 10 % finer than 2 µm is marked throughout (common practice, no source).
+   * cohesive soil: more than 10 % finer than 2 µm is marked throughout (common practice, no
+   * source).
    *
    * @param porosity one porosity, or a column with one for each curve
    */

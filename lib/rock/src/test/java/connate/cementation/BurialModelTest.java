@@ -16,6 +16,7 @@ import connate.chance.Runs;
 import connate.chance.Sampling;
 import connate.checks.Told;
 import connate.permeability.KozenyCarman;
+import connate.permeability.PandaLake;
 import connate.quantity.Units;
 import connate.series.Series;
 import java.util.Locale;
@@ -24,7 +25,7 @@ import org.junit.jupiter.api.Test;
 class BurialModelTest {
 
   private static final Sandstone SAND =
-      new Sandstone(um(300), percent(80), percent(30), percent(40), percent(28));
+      new Sandstone(um(300), number(1.3), percent(80), percent(30), percent(40), percent(28));
 
   private static BurialHistory history(double[]... points) {
     double[][] columns = new double[3][points.length];
@@ -56,7 +57,8 @@ class BurialModelTest {
   @Test
   void withoutCompactionItIsWalderhaug() {
     Sandstone sand =
-        new Sandstone(um(300), fraction(0.65 / 0.74), percent(0), percent(26), percent(26));
+        new Sandstone(
+            um(300), number(1.3), fraction(0.65 / 0.74), percent(0), percent(26), percent(26));
     BurialModel model = BurialModel.of(sand).with("compaction", 0).with("onset", 0);
     BurialHistory heating = history(new double[] {60, 0, 80}, new double[] {0, 100, 140});
     assertEquals(Reference.of("heating"), model.along(heating).finalPorosity().fraction(), 1e-8);
@@ -169,6 +171,24 @@ class BurialModelTest {
     assertEquals(path.size(), path.permeability().size());
   }
 
+  /**
+   * Independent: the law of Panda and Lake itself, with the moments of lognormal sizes by number:
+   * mean d exp(−2.5 σ²), C² = exp(σ²) − 1, skewness C³ + 3 C.
+   */
+  @Test
+  void pandaAndLakeOfLognormalGrains() {
+    BurialPath path =
+        BurialModel.of(SAND).with("sorting", 1.6).with(PermeabilityRule.PANDA_LAKE).along(STEADY);
+    double sigma = connate.grains.Trask.phiSpread(number(1.6)).value() * StrictMath.log(2);
+    double c = StrictMath.sqrt(StrictMath.expm1(sigma * sigma));
+    double mean = 300 * StrictMath.exp(-2.5 * sigma * sigma);
+    double law =
+        PandaLake.of(path.finalPorosity(), um(mean), c, c * c * c + 3 * c, 2.5).in(Units.mD);
+    assertEquals(law, path.finalPermeability().in(Units.mD), 1e-9 * law);
+    assertTrue(law < BurialModel.of(SAND).along(STEADY).finalPermeability().in(Units.mD));
+    assertThrows(IllegalArgumentException.class, () -> BurialModel.of(SAND).with("sorting", 0.8));
+  }
+
   /** Laws without a floor may count cement twice, and the model says so. */
   @Test
   void otherLawsOfCompaction() {
@@ -188,12 +208,12 @@ class BurialModelTest {
   void impossibleInputs() {
     BurialModel model = BurialModel.of(SAND);
     var name = assertThrows(IllegalArgumentException.class, () -> model.with("colour", 1));
-    assertTrue(name.getMessage().contains("grain size, quartz, coat"), name.getMessage());
+    assertTrue(name.getMessage().contains("grain size, sorting, quartz, coat"), name.getMessage());
     assertThrows(IllegalArgumentException.class, () -> model.with("coat", 35));
     assertThrows(IllegalArgumentException.class, () -> SAND.coated(percent(135)));
     assertThrows(
         IllegalArgumentException.class,
-        () -> new Sandstone(um(0), percent(80), percent(0), percent(40), percent(28)));
+        () -> new Sandstone(um(0), number(1.3), percent(80), percent(0), percent(40), percent(28)));
     assertThrows(IllegalArgumentException.class, () -> SAND.withStableVolume(percent(50)));
     assertThrows(
         IllegalArgumentException.class, () -> model.uncertain("coat", normal(um(300), um(30))));

@@ -140,7 +140,9 @@ class ConductivityTest {
     assertThrows(IllegalArgumentException.class, () -> table.within().geometricMean());
   }
 
-  /** A conductivity is no permeability: m² where m/s is meant is refused, and the other way round. */
+  /**
+   * A conductivity is no permeability: m² where m/s is meant is refused, and the other way round.
+   */
   @Test
   void conductivityIsNoPermeability() {
     Series k = Series.of("k", Units.squareMetres, 1e-12);
