@@ -34,7 +34,7 @@ public final class Barr {
   /** The facts above for {@code help}, the log and the method index. */
   public static final MethodCard CARD =
       MethodCard.named("barr", "Barr")
-          .equation("K = (g/ν) n³/(1 - n)² d10²/(180 Cs²)")
+          .equation("K = (g/ν) n³/(1 - n)² d10²/(180 Cs²), sizes in m")
           .input("d10", "size with 10 % finer", Units.mm, Range.POSITIVE)
           .input("n", "porosity", Units.fraction, Range.above(0).below(1))
           .input("T", "temperature of the water", Units.degC, Range.of(0, 100))

@@ -35,7 +35,7 @@ public final class BearKozenyCarman {
   /** The facts above for {@code help}, the log and the method index. */
   public static final MethodCard CARD =
       MethodCard.named("kozeny-carman-conductivity", "Kozeny–Carman, conductivity")
-          .equation("K = (g/ν) β n³/(1 - n)² d10²")
+          .equation("K = (g/ν) β n³/(1 - n)² d10², sizes in m")
           .input("d10", "size with 10 % finer", Units.mm, Range.POSITIVE)
           .valid(0, 3)
           .input("n", "porosity", Units.fraction, Range.above(0).below(1))

@@ -33,7 +33,7 @@ public final class Beyer {
   /** The facts above for {@code help}, the log and the method index. */
   public static final MethodCard CARD =
       MethodCard.named("beyer", "Beyer")
-          .equation("K = (g/ν) 6e-4 log10(500/Cu) d10²")
+          .equation("K = (g/ν) 6e-4 log10(500/Cu) d10², sizes in m")
           .input("d10", "size with 10 % finer", Units.mm, Range.POSITIVE)
           .valid(0.06, 0.6)
           .input("Cu", "uniformity coefficient", Units.number, Range.from(1))

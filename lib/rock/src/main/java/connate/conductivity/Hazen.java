@@ -34,7 +34,7 @@ public final class Hazen {
   /** The facts above for {@code help}, the log and the method index. */
   public static final MethodCard CARD =
       MethodCard.named("hazen", "Hazen")
-          .equation("K = (g/ν) 6e-4 (1 + 10 (n - 0.26)) d10²")
+          .equation("K = (g/ν) 6e-4 (1 + 10 (n - 0.26)) d10², sizes in m")
           .input("d10", "size with 10 % finer", Units.mm, Range.POSITIVE)
           .valid(0.1, 3)
           .input("n", "porosity", Units.fraction, Range.above(0.16).below(1))

@@ -33,7 +33,7 @@ public final class Sauerbrei {
   /** The facts above for {@code help}, the log and the method index. */
   public static final MethodCard CARD =
       MethodCard.named("sauerbrei", "Sauerbrei")
-          .equation("K = (g/ν) 3.75e-3 n³/(1 - n)² d17²")
+          .equation("K = (g/ν) 3.75e-3 n³/(1 - n)² d17², sizes in m")
           .input("d17", "size with 17 % finer", Units.mm, Range.POSITIVE)
           .valid(0, 0.5)
           .input("n", "porosity", Units.fraction, Range.above(0).below(1))

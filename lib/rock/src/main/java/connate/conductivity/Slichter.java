@@ -34,7 +34,7 @@ public final class Slichter {
   /** The facts above for {@code help}, the log and the method index. */
   public static final MethodCard CARD =
       MethodCard.named("slichter", "Slichter")
-          .equation("K = (g/ν) 0.01 n^3.287 d10²")
+          .equation("K = (g/ν) 0.01 n^3.287 d10², sizes in m")
           .input("d10", "size with 10 % finer", Units.mm, Range.POSITIVE)
           .valid(0.01, 5)
           .input("n", "porosity", Units.fraction, Range.above(0).below(1))

@@ -35,7 +35,7 @@ public final class Terzaghi {
   /** The facts above for {@code help}, the log and the method index. */
   public static final MethodCard CARD =
       MethodCard.named("terzaghi", "Terzaghi")
-          .equation("K = (g/ν) β ((n - 0.13)/(1 - n)^(1/3))² d10²")
+          .equation("K = (g/ν) β ((n - 0.13)/(1 - n)^(1/3))² d10², sizes in m")
           .input("d10", "size with 10 % finer", Units.mm, Range.POSITIVE)
           .input("n", "porosity", Units.fraction, Range.above(0.13).below(1))
           .input("T", "temperature of the water", Units.degC, Range.of(0, 100))

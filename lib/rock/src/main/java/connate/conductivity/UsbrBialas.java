@@ -33,7 +33,7 @@ public final class UsbrBialas {
   /** The facts above for {@code help}, the log and the method index. */
   public static final MethodCard CARD =
       MethodCard.named("usbr", "USBR formula")
-          .equation("K = (g/ν) 4.8e-4 d20^0.3 d20², the first d20 in mm")
+          .equation("K = (g/ν) 4.8e-4 d20[mm]^0.3 d20[m]²")
           .input("d20", "size with 20 % finer", Units.mm, Range.POSITIVE)
           .input("T", "temperature of the water", Units.degC, Range.of(0, 100))
           .result("K", "hydraulic conductivity", Units.mPerSecond)

@@ -33,7 +33,7 @@ public final class Zamarin {
   /** The facts above for {@code help}, the log and the method index. */
   public static final MethodCard CARD =
       MethodCard.named("zamarin", "Zamarin")
-          .equation("K = (g/ν) 8.65e-3 n³/(1 - n)² (1.275 - 1.5n)² de²")
+          .equation("K = (g/ν) 8.65e-3 n³/(1 - n)² (1.275 - 1.5n)² de², sizes in m")
           .input("de", "effective diameter", Units.mm, Range.POSITIVE)
           .input("n", "porosity", Units.fraction, Range.above(0).below(0.85))
           .input("T", "temperature of the water", Units.degC, Range.of(0, 100))

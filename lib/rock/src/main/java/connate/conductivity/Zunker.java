@@ -35,7 +35,7 @@ public final class Zunker {
   /** The facts above for {@code help}, the log and the method index. */
   public static final MethodCard CARD =
       MethodCard.named("zunker", "Zunker")
-          .equation("K = (g/ν) β (n/(1 - n))² de²")
+          .equation("K = (g/ν) β (n/(1 - n))² de², sizes in m")
           .input("de", "effective diameter", Units.mm, Range.POSITIVE)
           .input("n", "porosity", Units.fraction, Range.above(0).below(1))
           .input("T", "temperature of the water", Units.degC, Range.of(0, 100))
