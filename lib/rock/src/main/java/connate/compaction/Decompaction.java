@@ -112,6 +112,9 @@ public final class Decompaction {
   }
 
   static double baseKm(double initial, double perKm, double solid, double top) {
+    if (Double.isNaN(perKm)) {
+      return Double.NaN;
+    }
     double low = top + solid;
     double high = top + solid / (1 - initial);
     for (int i = 0; i < STEPS && high - low > PRECISION; i++) {

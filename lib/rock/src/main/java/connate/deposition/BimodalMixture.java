@@ -133,6 +133,9 @@ public final class BimodalMixture {
   }
 
   static double sizeMm(double c, double nc, double dc, double df) {
+    if (Double.isNaN(nc)) {
+      return Double.NaN;
+    }
     return c < nc
         ? StrictMath.exp((1 - c) * StrictMath.log(dc) + c * StrictMath.log(df))
         : 1 / ((1 - c) / dc + c / df);
