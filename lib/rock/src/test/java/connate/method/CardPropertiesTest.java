@@ -20,35 +20,24 @@ import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.TestFactory;
 
 /**
- * Every pair of a typed form and a column form in the packages from grains to cement, found by
- * reflection: the column gives what the single value gives, and another unit of the same input
- * changes nothing.
+ * Every pair of a typed form and a column form of the catalogue, found by reflection: the column
+ * gives what the single value gives, and another unit of the same input changes nothing.
  */
 class CardPropertiesTest {
-
-  private static final List<String> PACKAGES =
-      List.of(
-          "connate.grains.",
-          "connate.conductivity.",
-          "connate.deposition.",
-          "connate.compaction.",
-          "connate.cementation.");
 
   @TestFactory
   List<DynamicTest> columnEqualsValueInAnyUnit() throws Exception {
     List<DynamicTest> tests = new ArrayList<>();
     for (String name : MethodCards.classes()) {
-      if (PACKAGES.stream().anyMatch(name::startsWith)) {
-        for (Method typed : Class.forName(name).getMethods()) {
-          Method column = columnOf(typed);
-          if (column != null) {
-            String label = name + "." + typed.getName() + "/" + typed.getParameterCount();
-            tests.add(DynamicTest.dynamicTest(label, () -> compare(label, typed, column)));
-          }
+      for (Method typed : Class.forName(name).getMethods()) {
+        Method column = columnOf(typed);
+        if (column != null) {
+          String label = name + "." + typed.getName() + "/" + typed.getParameterCount();
+          tests.add(DynamicTest.dynamicTest(label, () -> compare(label, typed, column)));
         }
       }
     }
-    assertTrue(tests.size() > 45, "pairs found: " + tests.size());
+    assertTrue(tests.size() > 100, "pairs found: " + tests.size());
     return tests;
   }
 
@@ -130,6 +119,17 @@ class CardPropertiesTest {
       case "Slowness" -> Units.usPerFt(Seeds.between(random, 56, 180));
       case "SpecificSurface" -> Units.perUm(Seeds.between(random, 0.001, 1));
       case "ThermalGradient" -> Units.degCPerKm(Seeds.between(random, 10, 50));
+      case "Resistivity" -> Units.ohmM(Seeds.between(random, 0.05, 100));
+      case "GammaRay" -> Units.gAPI(Seeds.between(random, 1, 200));
+      case "InterfacialTension" -> Units.mNPerM(Seeds.between(random, 20, 480));
+      case "Compressibility" -> Units.perMPa(Seeds.between(random, 0.0001, 0.01));
+      case "Area" -> Units.cm2(Seeds.between(random, 1, 30));
+      case "Volume" -> Units.cm3(Seeds.between(random, 1, 30));
+      case "Rate" -> Units.m3PerDay(Seeds.between(random, 0.1, 900));
+      case "Transmissivity" -> Units.m2PerDay(Seeds.between(random, 1, 900));
+      case "Velocity" -> Units.kmPerSecond(Seeds.between(random, 1.5, 6));
+      case "Angle" -> Units.degrees(Seeds.between(random, 1, 89));
+      case "PressureGradient" -> Units.MPaPerKm(Seeds.between(random, 1, 30));
       default -> throw new IllegalStateException("no example of a " + type.getSimpleName());
     };
   }
