@@ -51,6 +51,14 @@ final class EngineProcess {
         List.of(
             "-XX:+UseSerialGC",
             "-XX:-UsePerfData",
+            // a short replay spends a fifth of its time compiling code that it hardly runs; long
+            // loops still come to C2
+            "-XX:Tier3InvocationThreshold=1000",
+            "-XX:Tier3MinInvocationThreshold=500",
+            "-XX:Tier3CompileThreshold=5000",
+            "-XX:Tier4InvocationThreshold=20000",
+            "-XX:Tier4MinInvocationThreshold=5000",
+            "-XX:Tier4CompileThreshold=60000",
             "-XX:+DisplayVMOutputToStderr",
             "-Xshare:auto",
             "-Xlog:disable",
