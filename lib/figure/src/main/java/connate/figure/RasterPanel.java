@@ -64,10 +64,10 @@ final class RasterPanel {
     ends(panel.x(), styler::setXAxisMin, styler::setXAxisMax);
     ends(panel.y(), styler::setYAxisMin, styler::setYAxisMax);
     if (!isPlain(panel.x())) {
-      chartLabels(panel.x(), styler::setxAxisTickLabelsFormattingFunction);
+      chartLabels(panel.x(), styler::setXAxisTickLabelsFormattingFunction);
     }
     if (!isPlain(panel.y())) {
-      chartLabels(panel.y(), styler::setyAxisTickLabelsFormattingFunction);
+      chartLabels(panel.y(), styler::setYAxisTickLabelsFormattingFunction);
     }
   }
 
