@@ -1,5 +1,6 @@
 package connate.console;
 
+import connate.fault.Nearest;
 import java.util.Collection;
 import java.util.Comparator;
 
@@ -34,27 +35,9 @@ final class Help {
 
   static String near(String word, Collection<String> known) {
     return known.stream()
-        .filter(k -> distance(word, k) <= FAR)
-        .min(Comparator.comparingInt(k -> distance(word, k)))
+        .filter(k -> Nearest.distance(word, k) <= FAR)
+        .min(Comparator.comparingInt(k -> Nearest.distance(word, k)))
         .map(k -> "; did you mean «" + k + "»?")
         .orElse("");
-  }
-
-  /** The least number of letters to put in, take out or change. */
-  static int distance(String a, String b) {
-    int[] row = new int[b.length() + 1];
-    for (int j = 0; j <= b.length(); j++) {
-      row[j] = j;
-    }
-    for (int i = 1; i <= a.length(); i++) {
-      int diagonal = row[0];
-      row[0] = i;
-      for (int j = 1; j <= b.length(); j++) {
-        int change = diagonal + (a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1);
-        diagonal = row[j];
-        row[j] = Math.min(change, Math.min(row[j], row[j - 1]) + 1);
-      }
-    }
-    return row[b.length()];
   }
 }

@@ -1,6 +1,7 @@
 package connate.console;
 
 import connate.compile.Complaint;
+import connate.fault.Nearest;
 import connate.protocol.Event;
 import connate.run.Shell;
 import connate.workbook.Workbook;
@@ -76,8 +77,8 @@ final class Wrong {
       Optional<String> found =
           names.stream()
               .filter(n -> !n.equals(word))
-              .filter(n -> Help.distance(n, word) <= word.length() / 3)
-              .min(Comparator.comparingInt(n -> Help.distance(n, word)));
+              .filter(n -> Nearest.distance(n, word) <= word.length() / 3)
+              .min(Comparator.comparingInt(n -> Nearest.distance(n, word)));
       if (found.isPresent()) {
         return found;
       }

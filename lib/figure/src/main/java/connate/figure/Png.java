@@ -18,9 +18,9 @@ import org.knowm.xchart.XYChart;
  *
  * <p>Needs the system's libraries freetype and fontconfig and one font.
  */
-public final class Raster {
+public final class Png {
 
-  private Raster() {}
+  private Png() {}
 
   /**
    * Returns the figure as a PNG.
@@ -31,11 +31,11 @@ public final class Raster {
    * @throws IllegalArgumentException if the figure is none of this library's, has an axis of names,
    *     or the machine has no font libraries
    */
-  public static byte[] png(Figure figure, int width, int height) {
+  public static byte[] of(Figure figure, int width, int height) {
     if (!(figure instanceof PlottedFigure plotted)) {
       throw new IllegalArgumentException("only figures of this library can be drawn as PNG");
     }
-    if (plotted.plot().panels().stream().anyMatch(Raster::hasNames)) {
+    if (plotted.plot().panels().stream().anyMatch(Png::hasNames)) {
       throw new IllegalArgumentException(
           "XChart has no axis of names beside one of numbers; use the SVG of «"
               + figure.title()
@@ -53,7 +53,7 @@ public final class Raster {
 
   /** Writes the figure as a PNG file of 1280 by 860 pixels, whole or not at all. */
   public static void write(Figure figure, Path file) {
-    AtomicFile.write(file, png(figure, 1280, 860));
+    AtomicFile.write(file, of(figure, 1280, 860));
   }
 
   private static boolean hasNames(Panel panel) {
@@ -73,7 +73,7 @@ public final class Raster {
         weight += panels.get(i).weight();
         int right = (int) Math.round(width * weight / all);
         XYChart chart =
-            RasterPanel.chart(panels.get(i), i == 0 ? plot.title() : "", right - left, height);
+            PngPanel.chart(panels.get(i), i == 0 ? plot.title() : "", right - left, height);
         graphics.translate(left, 0);
         chart.paint(graphics, right - left, height);
         graphics.translate(-left, 0);

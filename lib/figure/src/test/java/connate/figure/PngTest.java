@@ -18,7 +18,7 @@ import java.util.Set;
 import javax.imageio.ImageIO;
 import org.junit.jupiter.api.Test;
 
-class RasterTest {
+class PngTest {
 
   private static final Series PHI = Series.of("porosity", Units.percent, 8, 12, 17, 24, 22, 15);
   private static final Series K = Series.of("k", Units.mD, 0.1, 1, 12, 140, 0, 7);
@@ -43,7 +43,7 @@ class RasterTest {
     String folder = System.getProperty("raster.folder");
     int number = 0;
     for (Figure figure : figures()) {
-      byte[] png = Raster.png(figure, 640, 430);
+      byte[] png = Png.of(figure, 640, 430);
       BufferedImage image = image(png);
       assertEquals(640, image.getWidth(), figure.title());
       assertEquals(430, image.getHeight(), figure.title());
@@ -64,7 +64,7 @@ class RasterTest {
   void axesOfNamesAreRefusedInWords() {
     var e =
         assertThrows(
-            IllegalArgumentException.class, () -> Raster.png(Figures.boxes(PHI, FACIES), 640, 430));
+            IllegalArgumentException.class, () -> Png.of(Figures.boxes(PHI, FACIES), 640, 430));
     assertTrue(e.getMessage().contains("use the SVG"), e.getMessage());
   }
 
@@ -107,6 +107,6 @@ class RasterTest {
             return 1;
           }
         };
-    assertThrows(IllegalArgumentException.class, () -> Raster.png(foreign, 10, 10));
+    assertThrows(IllegalArgumentException.class, () -> Png.of(foreign, 10, 10));
   }
 }

@@ -15,7 +15,7 @@ import org.knowm.xchart.style.markers.Marker;
 import org.knowm.xchart.style.markers.SeriesMarkers;
 
 /** Makes an XChart chart of a panel: each layer a series, each scale an axis. */
-final class RasterPanel {
+final class PngPanel {
 
   private static final Color HAIRLINE = new Color(0xD9D9D9);
 
@@ -24,7 +24,7 @@ final class RasterPanel {
   private final Axis y;
   private int count;
 
-  private RasterPanel(XYChart chart, Panel panel) {
+  private PngPanel(XYChart chart, Panel panel) {
     this.chart = chart;
     this.x = panel.x();
     this.y = panel.y();
@@ -40,10 +40,10 @@ final class RasterPanel {
             .yAxisTitle(panel.y().title())
             .build();
     style(chart.getStyler(), panel);
-    RasterPanel raster = new RasterPanel(chart, panel);
-    panel.layers().forEach(raster::add);
-    if (raster.count == 0) {
-      raster.line("", new double[] {0, 1}, new double[] {0, 1}, HAIRLINE, 0.1f, "");
+    PngPanel drawn = new PngPanel(chart, panel);
+    panel.layers().forEach(drawn::add);
+    if (drawn.count == 0) {
+      drawn.line("", new double[] {0, 1}, new double[] {0, 1}, HAIRLINE, 0.1f, "");
     }
     return chart;
   }
