@@ -81,6 +81,10 @@ final class Guide {
     if (WORDS.containsKey(word)) {
       return List.of("  " + WORDS.get(word));
     }
+    Optional<List<String>> page = HelpPages.of(word);
+    if (page.isPresent()) {
+      return page.get();
+    }
     Optional<MethodCard> card = card(word);
     return card.map(c -> c.toString().lines().toList()).orElse(List.of());
   }
