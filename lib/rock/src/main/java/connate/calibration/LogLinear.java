@@ -5,6 +5,7 @@ import connate.method.Constants;
 import connate.method.MethodCard;
 import connate.method.Range;
 import connate.quantity.Units;
+import connate.series.Labels;
 import connate.series.Series;
 
 /**
@@ -57,5 +58,14 @@ public final class LogLinear {
    */
   public static TransformFit fit(Series porosity, Series permeability) {
     return TransformFit.of(FORM, porosity, permeability);
+  }
+
+  /**
+   * Fits the transform to plugs of one laboratory method; refuses to pool air with brine.
+   *
+   * @throws IllegalArgumentException if the plugs were not all measured alike
+   */
+  public static TransformFit fit(Series porosity, Series permeability, Labels method) {
+    return TransformFit.of(FORM, porosity, permeability, method);
   }
 }

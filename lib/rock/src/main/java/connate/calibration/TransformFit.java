@@ -60,6 +60,31 @@ public final class TransformFit implements Curve, Listed {
     return new TransformFit(form, plugs);
   }
 
+  /**
+   * Fits a form to plugs of one laboratory method.
+   *
+   * @param method how each plug was measured, such as air, brine, ambient, in situ
+   * @throws IllegalArgumentException if the plugs were not all measured alike: air and brine, or
+   *     ambient and in-situ values, make no common fit
+   */
+  public static TransformFit of(
+      TransformForm form, Series porosity, Series permeability, Labels method) {
+    if (method.distinct().size() > 1) {
+      throw new IllegalArgumentException(
+          "«"
+              + method.name()
+              + "» mixes "
+              + String.join(", ", method.distinct())
+              + ": plugs that were measured differently make no common fit; take"
+              + " table.where(\""
+              + method.name()
+              + "\", \""
+              + method.distinct().get(0)
+              + "\")");
+    }
+    return of(form, porosity, permeability);
+  }
+
   /** Returns the slope b, in decades of permeability per unit of the regressor. */
   public double slope() {
     return line.slope();

@@ -61,4 +61,21 @@ class MoreAveragesTest {
     assertEquals(expected, perfect, 1e-6 * expected);
     assertEquals(1, perfect * sealed, 1e-3);
   }
+
+  /**
+   * By hand: inlet column 1, 100, outlet column 10, 3: tubes 20/11 and 600/103, slices 50.5, 6.5.
+   */
+  @Test
+  @Check(method = "cardwell-parsons", kind = Kind.BY_HAND, source = "two tubes of two cells")
+  @Check(
+      method = "cardwell-parsons",
+      kind = Kind.INDEPENDENT,
+      source = "the exact two by two solution lies between")
+  void boundsOfABlock() {
+    var k = CardwellParsons.of(new double[][] {{1, 10}, {100, 3}});
+    assertEquals(3.821712, k.low().in(Units.mD), 5e-7);
+    assertEquals(11.51754, k.high().in(Units.mD), 5e-6);
+    var exact = Renormalisation.of(mD(1), mD(10), mD(100), mD(3));
+    assertTrue(exact.isAbove(k.low()) && exact.isBelow(k.high()), exact.toString());
+  }
 }

@@ -124,4 +124,16 @@ class LogLinearTest {
     assertEquals("Log-linear transform", table.text(0, 0));
     assertEquals(2, table.rows().size());
   }
+
+  @Test
+  void airAndBrineAreNotPooled() {
+    Series phi = porosity(10, 20, 30);
+    Series k = Series.of("k", Units.mD, 1, 10, 100);
+    var e =
+        assertThrows(
+            IllegalArgumentException.class,
+            () -> LogLinear.fit(phi, k, Labels.of("method", "air", "air", "brine")));
+    assertTrue(e.getMessage().contains("mixes air, brine"), e.getMessage());
+    assertEquals(3, LogLinear.fit(phi, k, Labels.of("method", "air", "air", "air")).n());
+  }
 }

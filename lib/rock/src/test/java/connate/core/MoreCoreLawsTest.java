@@ -1,5 +1,6 @@
 package connate.core;
 
+import static connate.quantity.Units.cP;
 import static connate.quantity.Units.fraction;
 import static connate.quantity.Units.mD;
 import static connate.quantity.Units.psi;
@@ -34,5 +35,20 @@ class MoreCoreLawsTest {
     double k = Klinkenberg.liquid(mD(0.1), psi(50), law).in(Units.mD);
     double b = PorositySlip.florence(mD(k), fraction(0.1)).in(Units.psi);
     assertEquals(0.1, k * (1 + b / 50), 1e-12);
+  }
+
+  /**
+   * By hand: nitrogen (0.0176 cP, 28.0) to helium (0.0196 cP, 4.003): factor 1.113636 · 2.644763 =
+   * 2.94531; the same gas changes nothing.
+   */
+  @Test
+  @Check(method = "slip-gas-conversion", kind = Kind.BY_HAND, source = "nitrogen to helium")
+  void otherGas() {
+    assertEquals(
+        29.4531,
+        GasConversion.slip(psi(10), cP(0.0176), 28.0, cP(0.0196), 4.003).in(Units.psi),
+        5e-4);
+    assertEquals(
+        10, GasConversion.slip(psi(10), cP(0.0176), 28.0, cP(0.0176), 28.0).in(Units.psi), 1e-12);
   }
 }

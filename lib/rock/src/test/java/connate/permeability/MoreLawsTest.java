@@ -1,6 +1,7 @@
 package connate.permeability;
 
 import static connate.quantity.Units.fraction;
+import static connate.quantity.Units.um;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import connate.checks.Check;
@@ -26,5 +27,23 @@ class MoreLawsTest {
     double expected = Units.squareMetres(0.2 * r * r / 8).in(Units.mD);
     double found = Purcell.of(fraction(0.2), 367.7, 1 / (pressure * pressure), 1).in(Units.mD);
     assertEquals(expected, found, 1e-4 * expected);
+  }
+
+  /** By hand: 2 ln 1 + 10.6 rounds to 11; the bounds double from 0.0938 to 48 µm. */
+  @Test
+  @Check(method = "discrete-rock-type", kind = Kind.BY_HAND, source = "2 ln 1 + 10.6 rounds to 11")
+  @Check(
+      method = "global-hydraulic-element",
+      kind = Kind.BY_HAND,
+      source = "doubling series of bounds")
+  void rockNumbers() {
+    assertEquals(11, RockNumbers.discrete(um(1)).value());
+    double bound = 0.09375;
+    for (int element = 1; element <= 10; element++) {
+      assertEquals(element, RockNumbers.global(um(bound)).value(), "at " + bound);
+      assertEquals(element - 1, RockNumbers.global(um(bound * 0.999)).value(), "below " + bound);
+      bound *= 2;
+    }
+    assertEquals(10, RockNumbers.global(um(500)).value());
   }
 }
